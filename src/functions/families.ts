@@ -1,0 +1,10 @@
+/** The families by which the functions are grouped everywhere: the job, in a sentence. */
+export interface Family {
+  readonly name: string;
+  readonly sentence: string;
+}
+
+export const families: readonly Family[] = [
+  { name: "Convert", sentence: "EMF to temperature and back, by the published reference functions." },
+  { name: "Record", sentence: "What stands behind a calculated cell." },
+];

@@ -1,0 +1,31 @@
+/** What a function gives back: a core value and how it is written in the unit of the call. */
+import { fromCelsius, type TemperatureUnit } from "../core";
+
+export interface ResultKind {
+  /** For the catalogue. */
+  readonly name: string;
+  readonly unit?: string;
+  /** The core's number in the call's unit. */
+  write(value: number, unit: TemperatureUnit): number;
+}
+
+const asItIs = (value: number): number => value;
+
+export const temperatureResult: ResultKind = { name: "temperature", unit: "°C", write: fromCelsius };
+
+/** Steps of a table are round numbers in the call's unit; conversion must not blur their last digits. */
+export const gridTemperatureResult: ResultKind = {
+  ...temperatureResult,
+  write: (value, unit) => Math.round(fromCelsius(value, unit) * 1e9) / 1e9,
+};
+
+export const emfResult: ResultKind = { name: "EMF", unit: "mV", write: asItIs };
+
+/** µV per degree of the call's unit. */
+export const seebeckResult: ResultKind = {
+  name: "Seebeck coefficient",
+  unit: "µV/°C",
+  write: (value, unit) => value * unit.degree,
+};
+
+export const wordResult: ResultKind = { name: "text", write: asItIs };

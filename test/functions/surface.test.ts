@@ -1,0 +1,68 @@
+/**
+ * The frozen public surface. Workbooks in the field hold these names and this order of arguments: a change here
+ * is a deliberate break, and belongs in the changelog.
+ */
+import { readFileSync } from "node:fs";
+import { describe, expect, it } from "vitest";
+import packageJson from "../../package.json";
+import { loadBuiltFunctions } from "../../src/build/built-functions";
+import metadata from "../../src/catalogue/functions.json";
+import { version } from "../../src/functions/version";
+
+const SURFACE: Readonly<Record<string, string>> = {
+  TEMPERATURE: "emf, type, referenceTemperature, [unit]",
+  EMF: "temperature, type, [referenceTemperature], [unit]",
+  SEEBECK: "temperature, type, [unit]",
+  EMFTABLE: "type, start, end, [step], [column], [unit]",
+  TYPEINFO: "type, [metric], [unit]",
+  TOITS90: "t68, [unit]",
+  PROVENANCE: "[metric]",
+};
+
+const declared = Object.fromEntries(
+  metadata.functions.map(({ id, parameters }) => [
+    id,
+    parameters
+      .map((parameter) => ("optional" in parameter ? `[${parameter.name}]` : parameter.name))
+      .join(", "),
+  ]),
+);
+
+describe("the public surface", () => {
+  it("is exactly this", () => {
+    expect(declared).toEqual(SURFACE);
+  });
+
+  it("is what functions.js associates", () => {
+    const built = loadBuiltFunctions(readFileSync("dist/functions.js", "utf8"));
+    expect([...built.keys()].sort()).toEqual(Object.keys(SURFACE).sort());
+  });
+
+  it("carries the version of the package", () => {
+    expect(version).toBe(packageJson.version);
+  });
+});
+
+describe("functions.json keeps the platform's limits", () => {
+  it("lets errors into ranges and data types not", () => {
+    expect(metadata).toMatchObject({ allowErrorForDataTypeAny: true });
+    expect(metadata).not.toHaveProperty("allowCustomDataForDataTypeAny");
+  });
+
+  it.each(metadata.functions)("$id", ({ id, name, description, helpUrl, parameters, result }) => {
+    expect(id).toBe(name);
+    // No reference to a cell, 3 to 64 characters; dots would become underscores in a saved file.
+    expect(id).toMatch(/^[A-Z][A-Z0-9]{2,63}$/);
+    expect(id).not.toMatch(/^[A-Z]{1,3}\d+$/);
+    expect(helpUrl).toBe(`https://localhost:3000/help.html#${id}`);
+    for (const text of [description, ...parameters.map((parameter) => parameter.description)]) {
+      expect(text.length).toBeGreaterThan(0);
+      expect(text.length).toBeLessThanOrEqual(255);
+      expect(text).not.toMatch(/\n|https?:/);
+    }
+    // Every argument arrives as a matrix: nothing is lifted cell by cell, and left out differs from blank.
+    for (const parameter of parameters)
+      expect(parameter).toMatchObject({ type: "any", dimensionality: "matrix" });
+    expect(result.dimensionality).toBe("matrix");
+  });
+});
