@@ -14,7 +14,7 @@ import { families } from "../functions/families";
 import { version } from "../functions/version";
 import type { DocumentedFunction } from "./sources";
 
-const SHAPES = { each: "cells", once: "cell" } as const;
+const SHAPES = { each: "cells", once: "cell", column: "column", block: "block" } as const;
 
 const worksheetFunctions = new Map<string, WorksheetFunction>(Object.entries(worksheet));
 

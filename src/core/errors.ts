@@ -25,6 +25,16 @@ export const degrees = (value: number): Quantity => ({
   print: (unit) => `${shortly(fromCelsius(value, unit))} ${unit.label}`,
 });
 
+/** A temperature difference held in °C: only the size of the degree counts. */
+export const degreesApart = (value: number): Quantity => ({
+  print: (unit) => `${shortly(value / unit.degree)} ${unit.label}`,
+});
+
+/** A number with a unit that is the same in every call: Ω, µV, min, … */
+export const measured = (value: number, unit: string): Quantity => ({
+  print: () => `${shortly(value)} ${unit}`,
+});
+
 /** An EMF in mV, to the tenth of a microvolt. */
 export const millivolts = (value: number): Quantity => ({
   print: () => `${String(Number(value.toFixed(4)))} mV`,

@@ -2,7 +2,16 @@
  * The one door to the calculations: pure functions and data, in °C, mV and Ω, that
  * know no spreadsheet, no DOM and no Node. What has no valid answer is a `Refusal`.
  */
-export { degrees, millivolts, noAnswer, Refusal, type RefusalKind, wrongKind } from "./errors";
+export {
+  degrees,
+  degreesApart,
+  measured,
+  millivolts,
+  noAnswer,
+  Refusal,
+  type RefusalKind,
+  wrongKind,
+} from "./errors";
 export { type Publication, type PublicationId, publications } from "./publications";
 export { emfBetween, seebeckAt, temperatureOf, temperaturesOf } from "./thermoelectric/convert";
 export { furtherDesignations, letterDesignations, spoken, thermocouple } from "./thermoelectric/designation";

@@ -3,7 +3,7 @@
  * whose parts other cells can ask for by name (rule 10 of the contract).
  */
 import { Refusal, type TemperatureUnit } from "../core";
-import { type Arguments, type Given, readOnce, unitOfCall, type Values } from "./arguments";
+import { type Arguments, type Given, readGiven, unitOfCall, type Values } from "./arguments";
 import { type CellError, error } from "./cell";
 import { type Declaration, declare, type WorksheetFunction } from "./declaration";
 import { failure } from "./failure";
@@ -30,7 +30,7 @@ export function whole<const A extends Arguments>(
     if (unit instanceof CustomFunctions.Error) return [[unit]];
     const values: Record<string, unknown> = {};
     for (const [name, argument] of Object.entries(spec.arguments)) {
-      const value = readOnce(name, argument, cells[name], unit);
+      const value = readGiven(name, argument, cells[name], unit);
       if (value instanceof CustomFunctions.Error) return [[value]];
       values[name] = value;
     }

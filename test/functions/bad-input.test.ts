@@ -168,9 +168,7 @@ describe("an argument", () => {
   it("that is left out has its default; a blank cell never stands for it", () => {
     expect(EMF(one(100), one("K"), omitted, omitted)).toEqual(EMF(one(100), one("K"), one(0), one("C")));
     expect(readable(EMF(one(100), one("K"), one("")))).toEqual([["#N/A reference temperature missing"]]);
-    expect(readable(SEEBECK(one(100), one("K"), one("")))).toEqual([
-      ["#VALUE! unit: the cell is blank; leave the argument out instead"],
-    ]);
+    expect(readable(SEEBECK(one(100), one("K"), one("")))).toEqual([["#VALUE! unit: the cell is blank"]]);
   });
 
   it("for the whole call takes one cell", () => {

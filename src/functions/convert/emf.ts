@@ -1,5 +1,5 @@
 import { emfBetween } from "../../core";
-import { each, eachOr, unit as unitOption } from "../arguments";
+import { each, orElse, unit as unitOption } from "../arguments";
 import { cellwise } from "../cellwise";
 import { couple } from "../kinds/couple";
 import { temperature as temperatureKind } from "../kinds/temperature";
@@ -37,7 +37,7 @@ const emf = cellwise(EMF, {
   arguments: {
     temperature: each(temperatureKind),
     type: each(couple),
-    referenceTemperature: eachOr(temperatureKind, 0, "0 °C"),
+    referenceTemperature: orElse(each(temperatureKind), 0, "0 °C"),
     unit: unitOption,
   },
   result: emfResult,

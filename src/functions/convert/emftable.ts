@@ -1,5 +1,5 @@
 import { emfBetween, Refusal, seebeckAt, temperatureGrid } from "../../core";
-import { once, onceIfGiven, unit as unitOption } from "../arguments";
+import { ifGiven, once, unit as unitOption } from "../arguments";
 import { couple } from "../kinds/couple";
 import { choice } from "../kinds/kind";
 import { temperature, temperatureDifference } from "../kinds/temperature";
@@ -39,8 +39,8 @@ const emftable = table(EMFTABLE, {
     type: once(couple),
     start: once(temperature),
     end: once(temperature),
-    step: onceIfGiven(temperatureDifference),
-    column: onceIfGiven(choice(["temperature", "emf", "seebeck_uv"])),
+    step: ifGiven(once(temperatureDifference)),
+    column: ifGiven(once(choice(["temperature", "emf", "seebeck_uv"]))),
     unit: unitOption,
   },
   result: { temperature: gridTemperatureResult, emf: emfResult, seebeck_uv: seebeckResult },

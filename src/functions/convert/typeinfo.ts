@@ -1,5 +1,5 @@
 import { publications, seebeckAt } from "../../core";
-import { once, onceIfGiven, unit as unitOption } from "../arguments";
+import { ifGiven, once, unit as unitOption } from "../arguments";
 import { couple } from "../kinds/couple";
 import { choice } from "../kinds/kind";
 import { emfResult, seebeckResult, temperatureResult, wordResult } from "../results";
@@ -29,19 +29,21 @@ export function TYPEINFO(type: unknown[][], metric?: unknown[][], unit?: unknown
 const typeinfo = metrics(TYPEINFO, {
   arguments: {
     type: once(couple),
-    metric: onceIfGiven(
-      choice([
-        "conductors",
-        "low",
-        "high",
-        "emf_low",
-        "emf_high",
-        "seebeck_mid_uv",
-        "unique_from",
-        "standard",
-        "publication",
-        "scale",
-      ]),
+    metric: ifGiven(
+      once(
+        choice([
+          "conductors",
+          "low",
+          "high",
+          "emf_low",
+          "emf_high",
+          "seebeck_mid_uv",
+          "unique_from",
+          "standard",
+          "publication",
+          "scale",
+        ]),
+      ),
     ),
     unit: unitOption,
   },

@@ -1,5 +1,5 @@
 import { publications } from "../../core";
-import { onceIfGiven } from "../arguments";
+import { ifGiven, once } from "../arguments";
 import { choice } from "../kinds/kind";
 import { wordResult } from "../results";
 import { version } from "../version";
@@ -23,7 +23,7 @@ export function PROVENANCE(metric?: unknown[][]): unknown[][] {
 const sources = Object.values(publications);
 
 const provenance = whole(PROVENANCE, {
-  arguments: { metric: onceIfGiven(choice(["version", "publications"])) },
+  arguments: { metric: ifGiven(once(choice(["version", "publications"]))) },
   result: { subject: wordResult, detail: wordResult },
   cells({ metric }) {
     if (metric === "version") return [[version]];

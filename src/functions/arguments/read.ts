@@ -1,0 +1,43 @@
+/** Reads what a call was given, before any cell is worked out. */
+import { celsius, Refusal, type TemperatureUnit } from "../../core";
+import { type CellError, error } from "../cell";
+import { failure } from "../failure";
+import { asMatrix, columnsOf, rowsOf } from "../matrix";
+import type { Argument, Arguments } from "./argument";
+
+export const isLeftOut = (given: unknown): boolean => given === null || given === undefined;
+
+/** An argument's name in words: referenceTemperature → reference temperature. */
+export const inWords = (name: string): string =>
+  name
+    .replace(/([a-z])([A-Z])/g, (_, before: string, after: string) => `${before} ${after.toLowerCase()}`)
+    .replace(/^emf\b/, "EMF");
+
+/** Reads one argument for the whole call. */
+export function readGiven<T>(
+  name: string,
+  argument: Argument<T>,
+  given: unknown,
+  unit: TemperatureUnit,
+): T | CellError {
+  if (isLeftOut(given)) {
+    return argument.optional ? (argument.standIn as T) : error("#VALUE!", `argument missing: ${name}`);
+  }
+  const matrix = asMatrix(given);
+  const label = inWords(name);
+  if (rowsOf(matrix) === 0 || columnsOf(matrix) === 0)
+    return error("#VALUE!", `${label}: the range is empty`);
+  const value = argument.read(matrix, label, unit);
+  return value instanceof Refusal ? failure(value, unit) : value;
+}
+
+/** The unit of the call, read before anything else: messages are printed in it. */
+export function unitOfCall(
+  declared: Arguments,
+  given: Readonly<Record<string, unknown>>,
+): TemperatureUnit | CellError {
+  const argument = declared.unit;
+  return argument === undefined
+    ? celsius
+    : (readGiven("unit", argument, given.unit, celsius) as TemperatureUnit | CellError);
+}

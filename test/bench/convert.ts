@@ -1,0 +1,75 @@
+/**
+ * What a conversion costs, as ratios to one evaluation of the reference function measured in the same run:
+ * the exact inverse, and one formula over a million readings on the built functions.
+ */
+import { resolve } from "node:path";
+import { type Thermocouple, thermocouple } from "../../src/core";
+import "../custom-functions-runtime";
+import { bestTimes, type Work } from "./ratio";
+
+const READINGS = 1_000_000;
+const ROUNDS = 9;
+
+type WorksheetFunction = (...given: (unknown[][] | undefined)[]) => unknown[][];
+
+/** Imported as a browser would run it: a sandboxed context would slow its look-up of globals. */
+async function builtFunctions(): Promise<Map<string, WorksheetFunction>> {
+  const built = new Map<string, WorksheetFunction>();
+  Object.assign(CustomFunctions, {
+    associate: (id: string, worksheetFunction: WorksheetFunction) => built.set(id, worksheetFunction),
+  });
+  await import(resolve("dist/functions.js"));
+  return built;
+}
+
+/** Spread evenly over 20 to 1350 °C in no order (multiples of the golden ratio). */
+function readings(couple: Thermocouple) {
+  const temperatures = Float64Array.from(
+    { length: READINGS },
+    (_, i) => 20 + 1330 * ((i * 0.618033988749895) % 1),
+  );
+  return { temperatures, emfs: temperatures.map((t) => couple.emf(t)) };
+}
+
+export interface Line {
+  readonly what: string;
+  readonly ratio: number;
+  readonly limit: number;
+}
+
+export async function convertLines(): Promise<Line[]> {
+  const couple = thermocouple("K") as Thermocouple;
+  const { temperatures, emfs } = readings(couple);
+  const column = Array.from(emfs, (emf) => [emf]);
+  const references = Array.from(temperatures, (t) => [20 + t / 200]);
+  const TEMPERATURE = (await builtFunctions()).get("TEMPERATURE") as WorksheetFunction;
+  let kept = 0;
+  const works: Work[] = [
+    {
+      name: "evaluation",
+      run() {
+        for (let i = 0; i < READINGS; i++) kept += couple.emf(temperatures[i] as number);
+      },
+    },
+    {
+      name: "inverse",
+      run() {
+        for (let i = 0; i < READINGS; i++) kept += couple.temperature(emfs[i] as number);
+      },
+    },
+    { name: "call", run: () => void TEMPERATURE(column, [["K"]], [[25]]) },
+    { name: "call with references", run: () => void TEMPERATURE(column, [["K"]], references) },
+  ];
+  const times = bestTimes(works, ROUNDS);
+  if (!Number.isFinite(kept)) throw new Error("the benchmark converted a reading to nothing");
+  const ratio = (name: string): number => (times.get(name) as number) / (times.get("evaluation") as number);
+  return [
+    { what: "exact inverse / one evaluation of the reference function", ratio: ratio("inverse"), limit: 1.5 },
+    { what: "one formula, 1 000 000 readings / bare loop of evaluations", ratio: ratio("call"), limit: 3.5 },
+    {
+      what: "the same with a reference temperature in each row",
+      ratio: ratio("call with references"),
+      limit: 4.5,
+    },
+  ];
+}
