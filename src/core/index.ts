@@ -13,7 +13,7 @@ export {
   wrongKind,
 } from "./errors";
 export { type Publication, type PublicationId, publications } from "./publications";
-export { emfBetween, seebeckAt, temperatureOf, temperaturesOf } from "./thermoelectric/convert";
+export { emfBetween, emfsBetween, seebeckAt, temperatureOf, temperaturesOf } from "./thermoelectric/convert";
 export { furtherDesignations, letterDesignations, spoken, thermocouple } from "./thermoelectric/designation";
 export { toIts90 } from "./thermoelectric/scale";
 export { temperatureGrid } from "./thermoelectric/table";

@@ -47,6 +47,48 @@ const published = {
     citation: "Rusby, Hudson, Durieux (1994)",
     title: "Revised values for (t90 − t68) from 630 °C to 1064 °C, Metrologia 31 (1994) 149–153",
   },
+  iec60584_3: {
+    citation: "IEC 60584-3:2007",
+    title: "Thermocouples – Part 3: Extension and compensating cables – Tolerances and identification system",
+  },
+  iec60751: {
+    citation: "IEC 60751:2008",
+    title: "Industrial platinum resistance thermometers and platinum temperature sensors",
+  },
+  jcgm100: {
+    citation: "JCGM 100:2008 (GUM)",
+    title: "Evaluation of measurement data – Guide to the expression of uncertainty in measurement",
+  },
+  jcgm101: {
+    citation: "JCGM 101:2008",
+    title:
+      "Evaluation of measurement data – Supplement 1 to the GUM – Propagation of distributions using a Monte Carlo method",
+  },
+  jcgm106: {
+    citation: "JCGM 106:2012",
+    title: "Evaluation of measurement data – The role of measurement uncertainty in conformity assessment",
+  },
+  ilacG8: {
+    citation: "ILAC-G8:09/2019",
+    title: "Guidelines on Decision Rules and Statements of Conformity",
+  },
+  ea4_02: {
+    citation: "EA-4/02 M:2013",
+    title: "Evaluation of the Uncertainty of Measurement in Calibration",
+  },
+  iso17043: {
+    citation: "ISO/IEC 17043:2010",
+    title: "Conformity assessment – General requirements for proficiency testing",
+  },
+  steinhartHart1968: {
+    citation: "Steinhart, Hart (1968)",
+    title: "Calibration curves for thermistors, Deep-Sea Research 15 (1968) 497–503",
+  },
+  fritschCarlson1980: {
+    citation: "Fritsch, Carlson (1980); Fritsch, Butland (1984)",
+    title:
+      "Monotone piecewise cubic interpolation, SIAM J. Numer. Anal. 17 (1980) 238–246; A method for constructing local monotone piecewise cubic interpolants, SIAM J. Sci. Stat. Comput. 5 (1984) 300–304",
+  },
 } as const satisfies Record<string, Publication>;
 
 export type PublicationId = keyof typeof published;

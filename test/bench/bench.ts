@@ -1,5 +1,6 @@
 /** `npm run bench`: ratios measured in one run. Machines differ; ratios hardly do. */
 import { convertLines } from "./convert";
+import { memoryOfMillionReadings } from "./memory";
 
 const lines = await convertLines();
 
@@ -9,4 +10,8 @@ for (const { what, ratio, limit } of lines) {
     `${ratio.toFixed(2).padStart(5)}   ${limit.toFixed(1).padStart(5)}   ${what}${ratio > limit ? "   OVER" : ""}`,
   );
 }
-console.log(`peak memory ${Math.round(process.resourceUsage().maxRSS / 1024)} MB`);
+const megabytes = (kilobytes: number): string => `${Math.round(kilobytes / 1024)} MB`;
+const { before, peak } = memoryOfMillionReadings();
+console.log(
+  `peak memory of a million readings in one formula: ${megabytes(peak)}, ${megabytes(before)} of it before the call`,
+);

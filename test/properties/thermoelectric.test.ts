@@ -2,6 +2,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import {
   emfBetween,
+  emfsBetween,
   furtherDesignations,
   letterDesignations,
   Refusal,
@@ -92,10 +93,16 @@ describe("temperatureOf", () => {
           const c = couple(name);
           const emfs = Float64Array.from(rows, ([emf]) => emf);
           const references = Float64Array.from(rows, ([, reference]) => reference);
-          temperaturesOf(c, emfs, references, rows.length);
+          const temperatures = new Float64Array(rows.length);
+          temperaturesOf(c, emfs, references, temperatures, rows.length);
+          // The same numbers once more, read as temperatures.
+          const emfColumn = new Float64Array(rows.length);
+          emfsBetween(c, emfs, references, emfColumn, rows.length);
           rows.forEach(([emf, reference], i) => {
             const alone = temperatureOf(c, emf, reference);
-            expect(emfs[i]).toBe(alone instanceof Refusal ? Number.NaN : alone);
+            expect(temperatures[i]).toBe(alone instanceof Refusal ? Number.NaN : alone);
+            const back = emfBetween(c, emf, reference);
+            expect(emfColumn[i]).toBe(back instanceof Refusal ? Number.NaN : back);
           });
         },
       ),

@@ -36,25 +36,43 @@ export function seebeckAt(couple: Thermocouple, t: number): number | Refusal {
     : millivoltsPerDegree * 1000;
 }
 
-/** `temperatureOf` down a column: the results replace `emfs`; NaN where `temperatureOf` would refuse. */
+/**
+ * `emfBetween` down a column, into `emfs`; NaN where `emfBetween` would refuse.
+ */
+export function emfsBetween(
+  couple: Thermocouple,
+  temperatures: Float64Array,
+  references: Float64Array,
+  emfs: Float64Array,
+  count: number,
+): void {
+  const offsets = referenceEmfs(couple, references, count);
+  couple.emfs(temperatures, emfs, count);
+  for (let i = 0; i < count; i++) emfs[i] = (emfs[i] as number) - (offsets[i] as number);
+}
+
+/** `temperatureOf` down a column, into `temperatures`; NaN where `temperatureOf` would refuse. */
 export function temperaturesOf(
   couple: Thermocouple,
   emfs: Float64Array,
   references: Float64Array,
+  temperatures: Float64Array,
   count: number,
 ): void {
-  let reference = Number.NaN;
-  let offset = Number.NaN;
-  for (let i = 0; i < count; i++) {
-    const here = references[i] as number;
-    // One terminal temperature often serves a whole column.
-    if (here !== reference) {
-      reference = here;
-      offset = couple.emf(here);
-    }
-    emfs[i] = (emfs[i] as number) + offset;
-  }
-  couple.temperaturesInPlace(emfs, count);
+  const sums = referenceEmfs(couple, references, count);
+  for (let i = 0; i < count; i++) sums[i] = (emfs[i] as number) + (sums[i] as number);
+  couple.temperatures(sums, temperatures, count);
+}
+
+/** E(reference) in mV for each row; worked out once when the reference junction is the same all the way. */
+function referenceEmfs(couple: Thermocouple, references: Float64Array, count: number): Float64Array {
+  const emfs = new Float64Array(count);
+  const first = references[0] as number;
+  let same = true;
+  for (let i = 1; same && i < count; i++) same = references[i] === first;
+  if (same) emfs.fill(couple.emf(first));
+  else couple.emfs(references, emfs, count);
+  return emfs;
 }
 
 /** Says which limit the sum of the EMFs passed, and the temperature at that limit. */

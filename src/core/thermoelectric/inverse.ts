@@ -59,6 +59,19 @@ export class SegmentInverse {
     return this.refine(emf, t);
   }
 
+  /**
+   * Converts those of the first `count` EMFs that lie inside this segment and are not
+   * converted yet: where two segments overlap, the lower one came first.
+   */
+  temperatures(emfs: Float64Array, temperatures: Float64Array, count: number): void {
+    const { emfFrom, emfTo } = this;
+    for (let i = 0; i < count; i++) {
+      const emf = emfs[i] as number;
+      if (emf > emfFrom && emf <= emfTo && Number.isNaN(temperatures[i]))
+        temperatures[i] = this.temperature(emf);
+    }
+  }
+
   /** Newton's method inside a shrinking bracket; halves the bracket when a step would leave it. */
   private refine(emf: number, start: number): number {
     let low = this.lowest;

@@ -42,6 +42,15 @@ export class Segment {
     return sum + exponential.a0 * Math.exp(exponential.a1 * offset * offset);
   }
 
+  /** E(t) for those of the first `count` temperatures from `from` to this segment's end that have no EMF yet. */
+  emfs(temperatures: Float64Array, emfs: Float64Array, count: number, from: number): void {
+    const { to } = this;
+    for (let i = 0; i < count; i++) {
+      const t = temperatures[i] as number;
+      if (t >= from && t <= to && Number.isNaN(emfs[i])) emfs[i] = this.emf(t);
+    }
+  }
+
   /** dE/dt in mV/°C. */
   slope(t: number): number {
     const slope = polynomial(this.slopeCoefficients, t);

@@ -37,9 +37,11 @@ export function byColumns<A extends Arguments>(
   const buffers: Record<string, Float64Array> = {};
   for (const [name, argument] of Object.entries(spec.arguments)) {
     if (argument.shape === "each" && isNumberKind(argument.kind)) {
+      // What was left out stays as it is filled here; ranges are copied over it.
       buffers[name] = new Float64Array(BLOCK).fill(Number(call.values[name]));
     }
   }
+  const answers = new Float64Array(BLOCK);
   const result: Cell[][] = new Array(call.rows);
   for (let top = 0; top < call.rows; top += BLOCK) {
     const count = Math.min(BLOCK, call.rows - top);
@@ -47,7 +49,7 @@ export function byColumns<A extends Arguments>(
       for (const { name, matrix, scale } of call.ranged) {
         if (scale !== undefined) fill(buffers[name] as Float64Array, matrix, top, count, column, scale);
       }
-      const answers = routine(fixed, buffers as NumberColumns<A>, count);
+      routine(fixed, buffers as NumberColumns<A>, answers, count);
       write(result, answers, call, spec, top, count, column);
     }
   }

@@ -9,10 +9,10 @@ export interface Cellwise<A extends Arguments> {
   /** The result of one cell, in core units. */
   cell(values: Values<A>, place: Place): number | string | Refusal;
   /**
-   * The same for `count` cells in which only numbers vary: writes each result, NaN where
-   * `cell` would refuse, over the column that it returns.
+   * The same for `count` cells in which only numbers vary: writes each result into
+   * `answers`, NaN where `cell` would refuse.
    */
-  column?(values: Values<A>, columns: NumberColumns<A>, count: number): Float64Array;
+  column?(values: Values<A>, columns: NumberColumns<A>, answers: Float64Array, count: number): void;
 }
 
 /** Where in the result a cell stands, from 0. */

@@ -1,4 +1,4 @@
-import { emfBetween } from "../../core";
+import { emfBetween, emfsBetween } from "../../core";
 import { each, orElse, unit as unitOption } from "../arguments";
 import { cellwise } from "../cellwise";
 import { couple } from "../kinds/couple";
@@ -42,4 +42,7 @@ const emf = cellwise(EMF, {
   },
   result: emfResult,
   cell: ({ temperature, type, referenceTemperature }) => emfBetween(type, temperature, referenceTemperature),
+  column({ type }, { temperature, referenceTemperature }, answers, count) {
+    emfsBetween(type, temperature, referenceTemperature, answers, count);
+  },
 });

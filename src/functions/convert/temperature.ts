@@ -43,8 +43,7 @@ const temperature = cellwise(TEMPERATURE, {
   },
   result: temperatureResult,
   cell: ({ emf, type, referenceTemperature }) => temperatureOf(type, emf, referenceTemperature),
-  column({ type }, { emf, referenceTemperature }, count) {
-    temperaturesOf(type, emf, referenceTemperature, count);
-    return emf;
+  column({ type }, { emf, referenceTemperature }, answers, count) {
+    temperaturesOf(type, emf, referenceTemperature, answers, count);
   },
 });
