@@ -3,6 +3,20 @@
  * know no spreadsheet, no DOM and no Node. What has no valid answer is a `Refusal`.
  */
 export {
+  type CalibratedCouple,
+  type Certificate,
+  type CertificateTerms,
+  calibratedCouple,
+  calibrationDrift,
+  certificate,
+  correctionUncertainty,
+  type DeviationFunction,
+  deviationDegrees,
+  deviationUv,
+  emfAtNominal,
+  fitDeviation,
+} from "./calibration";
+export {
   degrees,
   degreesApart,
   measured,
@@ -12,6 +26,20 @@ export {
   type RefusalKind,
   wrongKind,
 } from "./errors";
+export {
+  crossings,
+  diagnose,
+  differential,
+  type Lead,
+  leadError,
+  platinumResistance,
+  platinumTemperature,
+  releaded,
+  rereferenced,
+  retyped,
+  thermistor,
+  unreversed,
+} from "./junction";
 export { type Publication, type PublicationId, publications } from "./publications";
 export { emfBetween, emfsBetween, seebeckAt, temperatureOf, temperaturesOf } from "./thermoelectric/convert";
 export { furtherDesignations, letterDesignations, spoken, thermocouple } from "./thermoelectric/designation";

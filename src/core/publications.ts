@@ -89,6 +89,26 @@ const published = {
     title:
       "Monotone piecewise cubic interpolation, SIAM J. Numer. Anal. 17 (1980) 238–246; A method for constructing local monotone piecewise cubic interpolants, SIAM J. Sci. Stat. Comput. 5 (1984) 300–304",
   },
+  // The next four from memory.
+  ams2750: {
+    citation: "SAE AMS2750",
+    title: "Pyrometry (Aerospace Material Specification; latest revision known here: H, July 2024)",
+  },
+  hampel1974: {
+    citation: "Hampel (1974)",
+    title:
+      "F. R. Hampel, The influence curve and its role in robust estimation, J. Amer. Statist. Assoc. 69 (1974) 383–393",
+  },
+  bigelow1920: {
+    citation: "Bigelow et al. (1920)",
+    title:
+      "W. D. Bigelow, G. S. Bohart, A. C. Richardson, C. O. Ball, Heat penetration in processing canned foods, National Canners Association Bulletin 16-L (1920): the lethal rate and its integral",
+  },
+  haynes1971: {
+    citation: "Haynes (1971)",
+    title:
+      "J. D. Haynes, Worldwide virtual temperatures for product stability testing, J. Pharm. Sci. 60 (1971) 927–929",
+  },
 } as const satisfies Record<string, Publication>;
 
 export type PublicationId = keyof typeof published;

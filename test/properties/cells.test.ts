@@ -7,10 +7,36 @@ import { errorCell, one, readable } from "../functions/call";
 
 type WorksheetFunction = (...given: (unknown[][] | undefined)[]) => unknown[][];
 
+/** What stands in the required arguments that hold for the whole call. */
+const HELD: Readonly<Record<string, unknown[][]>> = {
+  coefficients: [[10], [0.01]],
+  crossedAt: [["both"]],
+  expandedUncertainties: [[1], [2], [3]],
+  high: [[1000]],
+  low: [[0]],
+  points: [[0], [500], [1000]],
+  values: [[1], [2], [3]],
+  // A resistance at 25 °C and a beta.
+  "NTCTEMPERATURE coefficients": [[10000], [3950]],
+};
+
+/** Each argument: a range that broadcasts, something for the whole call, or nothing. */
 const functions = catalogue.functions.flatMap(({ id, parameters }) => {
   const worksheetFunction = Object.entries(worksheet).find(([name]) => name === id)?.[1] as WorksheetFunction;
-  const ranged = parameters.filter(({ shape }) => shape === "cells").length;
-  return ranged === 0 ? [] : [{ id, worksheetFunction, ranged }];
+  if (!parameters.some(({ shape }) => shape === "cells")) return [];
+  const taken = parameters.map(({ name, shape, optional }) => {
+    if (shape === "cells") return "range";
+    if (optional) return undefined;
+    const held = HELD[`${id} ${name}`] ?? HELD[name];
+    if (held === undefined) throw new Error(`${id}: say in HELD what stands in ${name}`);
+    return held;
+  });
+  const ranges = taken.filter((one) => one === "range").length;
+  const call = (given: readonly (unknown[][] | undefined)[]): unknown[][] => {
+    let next = 0;
+    return worksheetFunction(...taken.map((one) => (one === "range" ? given[next++] : one)));
+  };
+  return [{ id, ranges, call }];
 });
 
 const cell = fc.oneof(
@@ -42,11 +68,11 @@ function stretched(
   return column < cells.length ? one(cells[column]) : undefined;
 }
 
-describe.each(functions)("$id", ({ worksheetFunction, ranged }) => {
+describe.each(functions)("$id", ({ ranges, call }) => {
   it("gives a block the results that its cells have alone, in the shape of the largest argument", () => {
     fc.assert(
-      fc.property(fc.array(block, { minLength: ranged, maxLength: ranged }), (given) => {
-        const result = readable(worksheetFunction(...given));
+      fc.property(fc.array(block, { minLength: ranges, maxLength: ranges }), (given) => {
+        const result = readable(call(given));
         const rows = Math.max(...given.map((matrix) => matrix.length));
         const columns = Math.max(...given.map((matrix) => matrix[0]?.length ?? 0));
         expect(result.length).toBe(rows);
@@ -57,7 +83,7 @@ describe.each(functions)("$id", ({ worksheetFunction, ranged }) => {
             if (cells.some((alone) => alone === undefined)) {
               expect(result[row]?.[column]).toBe("#N/A no value here: the ranges differ in size");
             } else {
-              expect(result[row]?.[column]).toBe(readable(worksheetFunction(...cells))[0]?.[0]);
+              expect(result[row]?.[column]).toBe(readable(call(cells))[0]?.[0]);
             }
           }
         }
@@ -68,8 +94,8 @@ describe.each(functions)("$id", ({ worksheetFunction, ranged }) => {
 
   it("answers with numbers, texts and errors only, never NaN or infinity", () => {
     fc.assert(
-      fc.property(fc.array(block, { minLength: ranged, maxLength: ranged }), (given) => {
-        for (const result of worksheetFunction(...given).flat()) {
+      fc.property(fc.array(block, { minLength: ranges, maxLength: ranges }), (given) => {
+        for (const result of call(given).flat()) {
           if (typeof result === "number") expect(Number.isFinite(result)).toBe(true);
           else if (typeof result !== "string") expect(result).toBeInstanceOf(CustomFunctions.Error);
         }

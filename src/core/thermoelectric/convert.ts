@@ -4,19 +4,14 @@
  * junction at r is E(t) − E(r), so it is EMFs that are added, never degrees.
  */
 import { degrees, millivolts, noAnswer, type Refusal } from "../errors";
-import { spoken } from "./designation";
+import { firstOutside, unreachable } from "./refusals";
 import type { Thermocouple } from "./thermocouple";
-
-const outsideRange = (couple: Thermocouple, t: number, what: string): Refusal =>
-  noAnswer`${what} ${degrees(t)} is outside the range of ${spoken(couple)}, ${degrees(couple.low)} to ${degrees(couple.high)}`;
 
 /** EMF in mV with the measuring junction at `t` and the reference junction at `reference`, both °C. */
 export function emfBetween(couple: Thermocouple, t: number, reference: number): number | Refusal {
   const emf = couple.emf(t) - couple.emf(reference);
   if (!Number.isNaN(emf)) return emf;
-  return Number.isNaN(couple.emf(t))
-    ? outsideRange(couple, t, "temperature")
-    : outsideRange(couple, reference, "reference temperature");
+  return firstOutside(couple, ["temperature", t], ["reference temperature", reference]);
 }
 
 /** Temperature in °C of the measuring junction, from the EMF in mV and the reference junction's temperature in °C. */
@@ -24,15 +19,19 @@ export function temperatureOf(couple: Thermocouple, emf: number, reference: numb
   const sum = emf + couple.emf(reference);
   const t = couple.temperature(sum);
   if (!Number.isNaN(t)) return t;
-  if (Number.isNaN(sum)) return outsideRange(couple, reference, "reference temperature");
-  return emfRefused(couple, emf, reference, sum);
+  if (Number.isNaN(sum)) return firstOutside(couple, ["reference temperature", reference]);
+  const lead =
+    reference === 0
+      ? noAnswer`EMF ${millivolts(sum)} is`
+      : noAnswer`EMF ${millivolts(emf)} with the reference junction at ${degrees(reference)} makes ${millivolts(sum)},`;
+  return unreachable(couple, sum, lead);
 }
 
 /** Seebeck coefficient in µV/°C at `t` °C. */
 export function seebeckAt(couple: Thermocouple, t: number): number | Refusal {
   const millivoltsPerDegree = couple.seebeck(t);
   return Number.isNaN(millivoltsPerDegree)
-    ? outsideRange(couple, t, "temperature")
+    ? firstOutside(couple, ["temperature", t])
     : millivoltsPerDegree * 1000;
 }
 
@@ -73,19 +72,4 @@ function referenceEmfs(couple: Thermocouple, references: Float64Array, count: nu
   if (same) emfs.fill(couple.emf(first));
   else couple.emfs(references, emfs, count);
   return emfs;
-}
-
-/** Says which limit the sum of the EMFs passed, and the temperature at that limit. */
-function emfRefused(couple: Thermocouple, emf: number, reference: number, sum: number): Refusal {
-  const total =
-    reference === 0
-      ? noAnswer`EMF ${millivolts(sum)}`
-      : noAnswer`EMF ${millivolts(emf)} with the reference junction at ${degrees(reference)} makes ${millivolts(sum)},`;
-  if (sum > couple.emfHigh) {
-    return total.and` above the limit of ${spoken(couple)}, ${millivolts(couple.emfHigh)} (${degrees(couple.high)})`;
-  }
-  if (couple.uniqueFrom > couple.low) {
-    return total.and` below ${millivolts(couple.emfUniqueFrom)}: under ${degrees(couple.uniqueFrom)} an EMF of ${spoken(couple)} belongs to two temperatures`;
-  }
-  return total.and` below the limit of ${spoken(couple)}, ${millivolts(couple.emfLow)} (${degrees(couple.low)})`;
 }

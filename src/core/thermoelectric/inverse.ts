@@ -8,6 +8,7 @@
  * kept inside a bracket. The table is computed at first use from the reference
  * function; nothing in it is typed in.
  */
+import { type Rising, whereReached } from "../numeric/root";
 import type { Segment } from "./segment";
 
 const CELLS = 512;
@@ -18,14 +19,13 @@ const TINY_STEP = 1e-6;
 /** Newton's method has converged when its step is below the spacing that matters, °C. */
 const CONVERGED = 1e-12;
 
-const MOST_STEPS = 100;
-
 export class SegmentInverse {
   readonly emfFrom: number;
   readonly emfTo: number;
   private readonly cellsPerMillivolt: number;
   /** Four coefficients a cell: t = c0 + u·(c1 + u·(c2 + u·c3)), u the place inside the cell, 0…1. */
   private readonly cubics: Float64Array;
+  private readonly rising: Rising;
 
   /** `lowest` and `highest` bound the part of the segment in which E rises. */
   constructor(
@@ -33,6 +33,7 @@ export class SegmentInverse {
     private readonly lowest: number,
     private readonly highest: number,
   ) {
+    this.rising = { value: (t) => segment.emf(t), slope: (t) => segment.slope(t) };
     this.emfFrom = segment.emf(lowest);
     this.emfTo = segment.emf(highest);
     this.cellsPerMillivolt = CELLS / (this.emfTo - this.emfFrom);
@@ -72,23 +73,8 @@ export class SegmentInverse {
     }
   }
 
-  /** Newton's method inside a shrinking bracket; halves the bracket when a step would leave it. */
   private refine(emf: number, start: number): number {
-    let low = this.lowest;
-    let high = this.highest;
-    let t = start > low && start < high ? start : low + (high - low) / 2;
-    for (let i = 0; i < MOST_STEPS; i++) {
-      const missing = emf - this.segment.emf(t);
-      if (missing === 0) return t;
-      if (missing > 0) low = t;
-      else high = t;
-      let next = t + missing / this.segment.slope(t);
-      if (!(next >= low && next <= high)) next = low + (high - low) / 2;
-      const step = Math.abs(next - t);
-      t = next;
-      if (step <= CONVERGED) return t;
-    }
-    return t;
+    return whereReached(this.rising, emf, this.lowest, this.highest, start, CONVERGED);
   }
 
   private tabulate(): Float64Array {

@@ -1,0 +1,73 @@
+import { describe, expect, it } from "vitest";
+import { fitPolynomial, type PolynomialFit } from "../../../src/core/numeric/least-squares";
+
+const fitted = (...given: Parameters<typeof fitPolynomial>): PolynomialFit => {
+  const fit = fitPolynomial(...given);
+  if (fit === undefined) throw new Error("not determined");
+  return fit;
+};
+
+describe("fitPolynomial", () => {
+  it("finds an exact polynomial again, far from the origin", () => {
+    const xs = [900, 950, 1000, 1050, 1100, 1150];
+    const ys = xs.map((x) => 3 - 2 * x + 0.5 * x * x);
+    expect(fitted(xs, ys, 2).coefficients).toEqual([3, -2, 0.5]);
+  });
+
+  it("weights points by the reciprocal of their squared uncertainty", () => {
+    // Order 0 is the weighted mean: (1/1 · 10 + 1/4 · 20)/(1 + 1/4) = 12, of variance 1/(1 + 1/4).
+    const fit = fitted([0, 1], [10, 20], 0, { uncertainties: [1, 2] });
+    expect(fit.coefficients[0]).toBeCloseTo(12, 14);
+    expect(fit.unitCovariance[0]?.[0]).toBeCloseTo(0.8, 14);
+  });
+
+  it("has the textbook covariance of a straight line", () => {
+    // s²/Sxx for the slope, s² (1/n + x̄²/Sxx) for the intercept, −s² x̄/Sxx between them; here s = 1.
+    const xs = [1, 2, 3, 4, 10];
+    const [n, mean, sxx] = [5, 4, 50];
+    const [first, second] = fitted(xs, [1, 5, 2, 8, 3], 1).unitCovariance as [number[], number[]];
+    expect(second[1]).toBeCloseTo(1 / sxx, 15);
+    expect(first[0]).toBeCloseTo(1 / n + mean ** 2 / sxx, 15);
+    expect(first[1]).toBeCloseTo(-mean / sxx, 15);
+    expect(second[0]).toBe(first[1]);
+  });
+
+  it("leaves out c0 through zero, and counts one coefficient less", () => {
+    const fit = fitted([1, 2, 4], [2, 5, 7], 1, { throughZero: true });
+    // Σxy/Σx² = (2 + 10 + 28)/21
+    expect(fit.coefficients[0]).toBe(0);
+    expect(fit.coefficients[1]).toBeCloseTo(40 / 21, 14);
+    expect(fit.dof).toBe(2);
+    expect(fit.unitCovariance[0]).toEqual([0, 0]);
+  });
+
+  it("has residuals that are orthogonal to every power", () => {
+    const xs = Array.from({ length: 15 }, (_, i) => 100 + 60 * i);
+    const ys = xs.map((x) => 30 * Math.sin(x / 150));
+    const { residuals } = fitted(xs, ys, 5);
+    for (let power = 0; power <= 5; power++) {
+      const along = residuals.reduce((sum, r, i) => sum + r * ((xs[i] as number) / 1000) ** power, 0);
+      expect(Math.abs(along)).toBeLessThan(1e-11);
+    }
+  });
+
+  it("is undetermined by fewer different places than coefficients", () => {
+    expect(fitPolynomial([1, 1, 2], [1, 2, 3], 2)).toBeUndefined();
+    expect(fitPolynomial([0, 0, 5], [1, 2, 3], 2, { throughZero: true })).toBeUndefined();
+    expect(fitPolynomial([1], [1], 0, { throughZero: true })).toBeUndefined();
+  });
+
+  it("gives nothing rather than infinities", () => {
+    expect(fitPolynomial([1, 2, 3], [1e308, -1e308, 1e308], 1)).toBeUndefined();
+  });
+
+  it("takes a column of 150 000 points", () => {
+    const xs = Array.from({ length: 150_000 }, (_, i) => i / 100);
+    const fit = fitted(
+      xs,
+      xs.map((x) => 1 + x),
+      1,
+    );
+    expect(fit.coefficients).toEqual([1, 1]);
+  });
+});
