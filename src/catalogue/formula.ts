@@ -99,17 +99,33 @@ export function parseExample(formula: string): ExampleCall {
   return { id, given };
 }
 
-/** A printed result, `99.974`, `"text"` or `{1,2;3,4}`, as a matrix; numbers keep their printed digits. */
-export function parseResult(result: string): { value: Constant; decimals: number }[][] {
-  const reader = new Reader(tokens(result));
+/** What an example prints as its result. */
+export interface PrintedResult {
+  readonly rows: readonly (readonly PrintedCell[])[];
+  /** Ended by "…": the function gives more rows than are printed. */
+  readonly more: boolean;
+}
+
+export interface PrintedCell {
+  readonly value: Constant;
+  /** Digits after the point, to which a number is printed. */
+  readonly decimals: number;
+}
+
+/** A printed result: `99.974`, `"text"`, `{1,2;3,4}`, or `{"first";…}` where more rows follow. */
+export function parseResult(result: string): PrintedResult {
+  const more = result.endsWith(";…}");
+  const printed = more ? `${result.slice(0, -3)}}` : result;
+  const reader = new Reader(tokens(printed));
   const values = matrix(reader);
   reader.end();
-  const digits = [...result.matchAll(TOKEN_NUMBER)].map(([, fraction]) => fraction?.length ?? 0);
+  const digits = [...printed.matchAll(NUMBER)].map(([, fraction]) => fraction?.length ?? 0);
   let next = 0;
-  return values.map((row) =>
+  const rows = values.map((row) =>
     row.map((value) => ({ value, decimals: typeof value === "number" ? (digits[next++] ?? 0) : 0 })),
   );
+  return { rows, more };
 }
 
 /** Numbers outside quotes; the group holds the digits after the point. */
-const TOKEN_NUMBER = /(?<!["\w.])-?\d+(?:\.(\d+))?(?=[,;}]|$)/g;
+const NUMBER = /(?<!["\w.])-?\d+(?:\.(\d+))?(?=[,;}]|$)/g;

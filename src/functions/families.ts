@@ -6,5 +6,11 @@ export interface Family {
 
 export const families: readonly Family[] = [
   { name: "Convert", sentence: "EMF to temperature and back, by the published reference functions." },
+  {
+    name: "Compensate",
+    sentence:
+      "The reference junction measured by another sensor, a wrong setting, a crossed or wrong pair: put right.",
+  },
+  { name: "Correct", sentence: "Calibration certificates, deviation functions and drift." },
   { name: "Record", sentence: "What stands behind a calculated cell." },
 ];

@@ -19,6 +19,16 @@ export const gridTemperatureResult: ResultKind = {
   write: (value, unit) => Math.round(fromCelsius(value, unit) * 1e9) / 1e9,
 };
 
+/** Only the size of the degree counts. */
+export const differenceResult: ResultKind = {
+  name: "temperature difference",
+  unit: "°C",
+  write: (value, unit) => value / unit.degree,
+};
+
+/** Degrees of difference per year. */
+export const differencePerYearResult: ResultKind = { ...differenceResult, name: "drift", unit: "°C/year" };
+
 export const emfResult: ResultKind = { name: "EMF", unit: "mV", write: asItIs };
 
 /** µV per degree of the call's unit. */
@@ -27,5 +37,14 @@ export const seebeckResult: ResultKind = {
   unit: "µV/°C",
   write: (value, unit) => value * unit.degree,
 };
+
+export const microvoltResult: ResultKind = { name: "EMF deviation", unit: "µV", write: asItIs };
+
+export const resistanceResult: ResultKind = { name: "resistance", unit: "Ω", write: asItIs };
+
+/** A date serial of the workbook. */
+export const dateResult: ResultKind = { name: "date", write: asItIs };
+
+export const numberResult: ResultKind = { name: "number", write: asItIs };
 
 export const wordResult: ResultKind = { name: "text", write: asItIs };

@@ -109,7 +109,7 @@ describe("beside a good reading", () => {
 describe("an EMF of type B", () => {
   it("below its zero crossing belongs to two temperatures", () => {
     expect(readable(TEMPERATURE(one(-0.001), one("B"), one(0)))).toEqual([
-      ["#N/A EMF -0.001 mV below 0 mV: under 42.1321 °C an EMF of type B belongs to two temperatures"],
+      ["#N/A EMF -0.001 mV is below 0 mV: under 42.1321 °C an EMF of type B belongs to two temperatures"],
     ]);
   });
 });

@@ -39,7 +39,7 @@ export type Given<A extends Arguments> = {
 /** May be left out; then this value holds. */
 export const orElse = <T, S extends Shape>(
   argument: Argument<T, S, false>,
-  standIn: T,
+  standIn: NoInfer<T>,
   printed: string,
 ): Argument<T, S, true> => ({ ...argument, optional: true, standIn, printed });
 

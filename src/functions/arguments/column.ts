@@ -33,7 +33,7 @@ function readAll<T>(
 }
 
 /** The cells of a single row or column, and how a message names one of them. */
-function line(
+function cellsInLine(
   given: Matrix,
   label: string,
 ): { cells: readonly unknown[]; name: (index: number) => string } | Refusal {
@@ -52,7 +52,7 @@ export const gappedColumn = <T>(kind: Kind<T>): Argument<readonly (T | undefined
   kind,
   optional: false,
   read(given, label, unit) {
-    const found = line(given, label);
+    const found = cellsInLine(given, label);
     return found instanceof Refusal ? found : readAll(found.cells, kind, found.name, unit);
   },
 });
@@ -63,12 +63,29 @@ export const column = <T>(kind: Kind<T>): Argument<readonly T[], "column", false
   kind,
   optional: false,
   read(given, label, unit) {
-    const found = line(given, label);
+    const found = cellsInLine(given, label);
     if (found instanceof Refusal) return found;
     const values = readAll(found.cells, kind, found.name, unit);
     if (failed(values)) return values;
     const blank = values.indexOf(undefined);
     return blank < 0 ? (values as T[]) : wrongKind`${found.name(blank)}: the cell is blank`;
+  },
+});
+
+/** A row or column without blanks that remembers which of the two it was. */
+export interface Line<T> {
+  readonly values: readonly T[];
+  /** Lies in one row. */
+  readonly across: boolean;
+}
+
+export const line = <T>(kind: Kind<T>): Argument<Line<T>, "column", false> => ({
+  shape: "column",
+  kind,
+  optional: false,
+  read(given, label, unit) {
+    const values = column(kind).read(given, label, unit);
+    return failed(values) ? values : { values, across: rowsOf(given) === 1 && columnsOf(given) > 1 };
   },
 });
 

@@ -5,7 +5,7 @@ import { orElse } from "./argument";
 import { once } from "./once";
 
 export { type Argument, type Arguments, type Given, ifGiven, orElse, type Values } from "./argument";
-export { block, column, gappedColumn } from "./column";
+export { block, column, gappedColumn, type Line, line } from "./column";
 export { each, once } from "./once";
 export { inWords, isLeftOut, readGiven, unitOfCall } from "./read";
 

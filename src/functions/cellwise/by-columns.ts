@@ -15,7 +15,7 @@ import type { Cellwise, NumberColumns } from "./spec";
 const BLOCK = 2048;
 
 /** Every argument that is not a number is one good cell for the whole call. Leaves its value in `call.values`. */
-export function onlyNumbersVary<A extends Arguments>(call: Call<A>): boolean {
+export function onlyNumbersVary<A extends Arguments, P>(call: Call<A, P>): boolean {
   for (const { name, label, argument, matrix, scale } of call.ranged) {
     if (scale !== undefined) continue;
     if (rowsOf(matrix) !== 1 || columnsOf(matrix) !== 1) return false;
@@ -28,9 +28,9 @@ export function onlyNumbersVary<A extends Arguments>(call: Call<A>): boolean {
   return true;
 }
 
-export function byColumns<A extends Arguments>(
-  call: Call<A>,
-  spec: Cellwise<A>,
+export function byColumns<A extends Arguments, P>(
+  call: Call<A, P>,
+  spec: Cellwise<A, P>,
   routine: NonNullable<Cellwise<A>["column"]>,
 ): Cell[][] {
   const fixed = { ...call.values } as Values<A>;
@@ -50,7 +50,7 @@ export function byColumns<A extends Arguments>(
         if (scale !== undefined) fill(buffers[name] as Float64Array, matrix, top, count, column, scale);
       }
       routine(fixed, buffers as NumberColumns<A>, answers, count);
-      write(result, answers, call, spec, top, count, column);
+      write(result, answers, call, top, count, column);
     }
   }
   return result;
@@ -79,18 +79,17 @@ function fill(
   for (let i = 0; i < count; i++) buffer[i] = ((buffer[i] as number) - zero) * factor;
 }
 
-function write<A extends Arguments>(
+function write<A extends Arguments, P>(
   result: Cell[][],
   answers: Float64Array,
-  call: Call<A>,
-  spec: Cellwise<A>,
+  call: Call<A, P>,
   top: number,
   count: number,
   column: number,
 ): void {
-  const inSheetUnits = spec.result.write(0, call.unit) === 0 && spec.result.write(1, call.unit) === 1;
+  const inSheetUnits = call.result.write(0, call.unit) === 0 && call.result.write(1, call.unit) === 1;
   if (!inSheetUnits) {
-    for (let i = 0; i < count; i++) answers[i] = spec.result.write(answers[i] as number, call.unit);
+    for (let i = 0; i < count; i++) answers[i] = call.result.write(answers[i] as number, call.unit);
   }
   if (column === 0) {
     // A row of one number is an array of numbers to the engine that runs this: half the memory.

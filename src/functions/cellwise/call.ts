@@ -13,7 +13,8 @@ import { type CellError, error, type Reading, readCell } from "../cell";
 import { failure } from "../failure";
 import { isNumberKind, type Scale } from "../kinds/kind";
 import { asMatrix, cellAt, columnsOf, type Matrix, OUTSIDE, rowsOf } from "../matrix";
-import type { Cellwise } from "./spec";
+import type { ResultKind } from "../results";
+import type { CallValues, Cellwise } from "./spec";
 
 /** No spreadsheet takes more cells than this from one formula; refusing beats running out of memory. */
 const MOST_CELLS = 20_000_000;
@@ -33,7 +34,7 @@ interface Ranged {
   lastValue: unknown;
 }
 
-export class Call<A extends Arguments> {
+export class Call<A extends Arguments, P> {
   readonly unit: TemperatureUnit;
   /** What is wrong with the call as a whole. */
   readonly fault: CellError | undefined;
@@ -43,14 +44,18 @@ export class Call<A extends Arguments> {
   readonly values: Record<string, unknown> = {};
   readonly rows: number = 0;
   readonly columns: number = 0;
+  /** How the numbers of this call are written. */
+  readonly result: ResultKind;
+  private readonly prepared: P | undefined;
   private readonly place = { row: 0, column: 0 };
 
   constructor(
-    private readonly spec: Cellwise<A>,
+    private readonly spec: Cellwise<A, P>,
     given: Readonly<Record<string, unknown>>,
   ) {
     const unit = unitOfCall(spec.arguments, given);
     this.unit = unit as TemperatureUnit;
+    this.result = spec.result;
     if (unit instanceof CustomFunctions.Error) {
       this.fault = unit;
       return;
@@ -66,7 +71,13 @@ export class Call<A extends Arguments> {
     this.columns = Math.max(...this.ranged.map(({ matrix }) => columnsOf(matrix)));
     if (this.rows * this.columns > MOST_CELLS) {
       this.fault = error("#VALUE!", `a result of ${this.rows} × ${this.columns} cells is too large`);
+      return;
     }
+    const held = this.values as unknown as CallValues<A>;
+    if (spec.resultOf !== undefined) this.result = spec.resultOf(held);
+    const prepared = spec.prepare?.(held);
+    if (prepared instanceof Refusal) this.fault = failure(prepared, this.unit);
+    else this.prepared = prepared;
   }
 
   /** One cell; the good one is tested first, whatever else is left to `careful`. */
@@ -128,8 +139,8 @@ export class Call<A extends Arguments> {
   private answer(row: number, column: number): Cell {
     this.place.row = row;
     this.place.column = column;
-    const result = this.spec.cell(this.values as Values<A>, this.place);
+    const result = this.spec.cell(this.values as Values<A>, this.prepared as P, this.place);
     if (result instanceof Refusal) return failure(result, this.unit);
-    return typeof result === "number" ? this.spec.result.write(result, this.unit) : result;
+    return typeof result === "number" ? this.result.write(result, this.unit) : result;
   }
 }

@@ -8,9 +8,9 @@ import { byColumns, onlyNumbersVary } from "./by-columns";
 import { Call, type Cell } from "./call";
 import type { Cellwise } from "./spec";
 
-export function cellwise<const A extends Arguments>(
+export function cellwise<const A extends Arguments, P = undefined>(
   worksheetFunction: WorksheetFunction,
-  spec: Cellwise<A>,
+  spec: Cellwise<A, P>,
 ): (given: Given<A>) => Cell[][] {
   declare(worksheetFunction, spec);
   return (given) => {

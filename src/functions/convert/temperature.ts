@@ -2,7 +2,7 @@ import { temperatureOf, temperaturesOf } from "../../core";
 import { each, unit as unitOption } from "../arguments";
 import { cellwise } from "../cellwise";
 import { couple } from "../kinds/couple";
-import { emf as emfInMillivolts } from "../kinds/emf";
+import { emf as emfInMillivolts } from "../kinds/numbers";
 import { temperature as temperatureKind } from "../kinds/temperature";
 import { temperatureResult } from "../results";
 

@@ -52,7 +52,7 @@ export function plainNumber(name: string, unit?: string): NumberKind {
 }
 
 /** One of a few words, in upper or lower case. */
-export function choice<T extends string>(options: readonly T[]): Kind<T> {
+export function choice<const T extends string>(options: readonly T[]): Kind<T> {
   return {
     name: "option",
     options,
