@@ -1,0 +1,90 @@
+/**
+ * Tolerance tables as makers print them: constant up to the breakpoint, proportional beyond it.
+ * Breakpoints are printed to the degree, so the two forms differ there by up to 0.006 °C.
+ */
+export interface PrintedRow {
+  readonly type: string;
+  readonly name: string;
+  readonly from: number;
+  readonly to: number;
+  /** ± °C, or a proportion of |t|. */
+  readonly constant?: number;
+  readonly proportion?: number;
+}
+
+/** The tables of IEC 60584-2:1982 with amendment 1, taken over by IEC 60584-1:2013 (three makers' tables). */
+// biome-ignore format: one row a line
+export const printedIec: readonly PrintedRow[] = [
+  { type: "T", name: "1", from: -40, to: 125, constant: 0.5 },
+  { type: "T", name: "1", from: 125, to: 350, proportion: 0.004 },
+  { type: "T", name: "2", from: -40, to: 133, constant: 1 },
+  { type: "T", name: "2", from: 133, to: 350, proportion: 0.0075 },
+  { type: "T", name: "3", from: -67, to: 40, constant: 1 },
+  { type: "T", name: "3", from: -200, to: -67, proportion: 0.015 },
+  { type: "E", name: "1", from: -40, to: 375, constant: 1.5 },
+  { type: "E", name: "1", from: 375, to: 800, proportion: 0.004 },
+  { type: "E", name: "2", from: -40, to: 333, constant: 2.5 },
+  { type: "E", name: "2", from: 333, to: 900, proportion: 0.0075 },
+  { type: "E", name: "3", from: -167, to: 40, constant: 2.5 },
+  { type: "E", name: "3", from: -200, to: -167, proportion: 0.015 },
+  { type: "J", name: "1", from: -40, to: 375, constant: 1.5 },
+  { type: "J", name: "1", from: 375, to: 750, proportion: 0.004 },
+  { type: "J", name: "2", from: -40, to: 333, constant: 2.5 },
+  { type: "J", name: "2", from: 333, to: 750, proportion: 0.0075 },
+  { type: "K", name: "1", from: -40, to: 375, constant: 1.5 },
+  { type: "K", name: "1", from: 375, to: 1000, proportion: 0.004 },
+  { type: "K", name: "2", from: -40, to: 333, constant: 2.5 },
+  { type: "K", name: "2", from: 333, to: 1200, proportion: 0.0075 },
+  { type: "K", name: "3", from: -167, to: 40, constant: 2.5 },
+  { type: "K", name: "3", from: -200, to: -167, proportion: 0.015 },
+  { type: "N", name: "1", from: -40, to: 375, constant: 1.5 },
+  { type: "N", name: "1", from: 375, to: 1000, proportion: 0.004 },
+  { type: "N", name: "2", from: -40, to: 333, constant: 2.5 },
+  { type: "N", name: "2", from: 333, to: 1200, proportion: 0.0075 },
+  { type: "N", name: "3", from: -167, to: 40, constant: 2.5 },
+  { type: "N", name: "3", from: -200, to: -167, proportion: 0.015 },
+  { type: "R", name: "1", from: 0, to: 1100, constant: 1 },
+  { type: "R", name: "2", from: 0, to: 600, constant: 1.5 },
+  { type: "R", name: "2", from: 600, to: 1600, proportion: 0.0025 },
+  { type: "S", name: "1", from: 0, to: 1100, constant: 1 },
+  { type: "S", name: "2", from: 0, to: 600, constant: 1.5 },
+  { type: "S", name: "2", from: 600, to: 1600, proportion: 0.0025 },
+  { type: "B", name: "2", from: 600, to: 1700, proportion: 0.0025 },
+  { type: "B", name: "3", from: 600, to: 800, constant: 4 },
+  { type: "B", name: "3", from: 800, to: 1700, proportion: 0.005 },
+  // From memory:
+  { type: "C", name: "2", from: 426, to: 2315, proportion: 0.01 },
+  { type: "A", name: "2", from: 1000, to: 2500, proportion: 0.01 },
+];
+
+/** ASTM E230/E230M: [type, class, t, ± °C] at both ends and beside the breakpoints (a summary sheet and four makers' tables). */
+// biome-ignore format: one row a line
+export const printedAstm: readonly (readonly [type: string, name: string, t: number, limit: number])[] = [
+  ["T", "standard", 0, 1], ["T", "standard", 100, 1], ["T", "standard", 200, 1.5], ["T", "standard", 370, 2.775],
+  ["T", "standard", -200, 3], ["T", "standard", -100, 1.5], ["T", "standard", -50, 1],
+  ["T", "special", 0, 0.5], ["T", "special", 125, 0.5], ["T", "special", 370, 1.48],
+  ["J", "standard", 0, 2.2], ["J", "standard", 293, 2.2], ["J", "standard", 760, 5.7],
+  ["J", "special", 0, 1.1], ["J", "special", 275, 1.1], ["J", "special", 760, 3.04],
+  ["E", "standard", 0, 1.7], ["E", "standard", 340, 1.7], ["E", "standard", 870, 4.35],
+  ["E", "standard", -200, 2], ["E", "standard", -170, 1.7], ["E", "standard", -100, 1.7],
+  ["E", "special", 0, 1], ["E", "special", 250, 1], ["E", "special", 870, 3.48],
+  ["K", "standard", 0, 2.2], ["K", "standard", 293, 2.2], ["K", "standard", 400, 3], ["K", "standard", 1260, 9.45],
+  ["K", "special", 0, 1.1], ["K", "special", 275, 1.1], ["K", "special", 1260, 5.04],
+  ["N", "standard", 0, 2.2], ["N", "standard", 1260, 9.45],
+  ["N", "special", 0, 1.1], ["N", "special", 1260, 5.04],
+  ["R", "standard", 0, 1.5], ["R", "standard", 600, 1.5], ["R", "standard", 1480, 3.7],
+  ["R", "special", 0, 0.6], ["R", "special", 600, 0.6], ["R", "special", 1480, 1.48],
+  ["S", "standard", 0, 1.5], ["S", "standard", 1000, 2.5], ["S", "standard", 1480, 3.7],
+  ["S", "special", 0, 0.6], ["S", "special", 1000, 1], ["S", "special", 1480, 1.48],
+  ["B", "standard", 870, 4.35], ["B", "standard", 1700, 8.5],
+  ["B", "special", 870, 2.175], ["B", "special", 1700, 4.25],
+  ["C", "standard", 2315, 23.15],
+];
+
+/** IEC 60751 tolerances in °C as tabulated by sensor makers (five copies). */
+// biome-ignore format: one row a line
+export const printedPlatinum: readonly (readonly [name: string, t: number, limit: number])[] = [
+  ["A", -100, 0.35], ["A", 0, 0.15], ["A", 100, 0.35], ["A", 200, 0.55], ["A", 300, 0.75], ["A", 400, 0.95],
+  ["B", -100, 0.8], ["B", 0, 0.3], ["B", 100, 0.8], ["B", 200, 1.3], ["B", 300, 1.8], ["B", 400, 2.3],
+  ["B", 500, 2.8], ["B", 600, 3.3],
+];
