@@ -1,0 +1,2 @@
+/** Style sheets are imported for their effect: webpack extracts them into one file per page. */
+declare module "*.css";
