@@ -40,21 +40,23 @@ describe("the pages", () => {
     },
   );
 
-  it("list every function by keyboard, in the pane without Office and beside the grid", async () => {
-    for (const path of ["taskpane.html", "sheet.html"]) {
-      const watched = await openPage(path, { viewport: { width: 700, height: 800 } });
-      const { page } = watched;
-      await page.locator("details").first().waitFor();
-      const functions = await page.evaluate(
-        async () => (await (await fetch("functions.json")).json()).functions,
-      );
-      expect(await page.locator("details").count()).toBe(functions.length);
-      await page.locator("summary").first().focus();
-      await page.keyboard.press("Enter");
-      expect(await page.locator("details").first().locator("dl.arguments").isVisible()).toBe(true);
-      if (path === "sheet.html") await page.waitForFunction(() => window.beadlineSheet !== undefined);
-      await closePage(watched);
-    }
+  it.each([
+    ["in the pane, with Office.js but no Excel around it", "taskpane.html", { office: "script" }],
+    ["in the pane, where Office.js cannot be reached", "taskpane.html", { office: "absent" }],
+    ["beside the grid", "sheet.html", {}],
+  ] as const)("list every function by keyboard %s", async (_, path, options) => {
+    const watched = await openPage(path, { viewport: { width: 700, height: 800 }, ...options });
+    const { page } = watched;
+    await page.locator("details").first().waitFor();
+    const functions = await page.evaluate(
+      async () => (await (await fetch("functions.json")).json()).functions,
+    );
+    expect(await page.locator("details").count()).toBe(functions.length);
+    await page.locator("summary").first().focus();
+    await page.keyboard.press("Enter");
+    expect(await page.locator("details").first().locator("dl.arguments").isVisible()).toBe(true);
+    if (path === "sheet.html") await page.waitForFunction(() => window.beadlineSheet !== undefined);
+    await closePage(watched);
   });
 
   it("hide and show the list of functions on the local sheet", async () => {

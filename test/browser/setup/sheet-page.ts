@@ -14,19 +14,37 @@ export interface WatchedPage {
   faults: string[];
 }
 
-export async function openPage(path = "", options: BrowserContextOptions = {}): Promise<WatchedPage> {
+/** Where Excel's script comes from. Tests answer for that host themselves: no request leaves the machine. */
+const OFFICE_HOST = "https://appsforoffice.microsoft.com/";
+
+export interface PageOptions extends BrowserContextOptions {
+  /** `script`: the vendor's own Office.js, from its npm package. `absent`: the host cannot be reached. */
+  office?: "script" | "absent";
+}
+
+export async function openPage(path = "", { office, ...options }: PageOptions = {}): Promise<WatchedPage> {
   browser ??= await chromium.connect(inject("browser"));
   const context = await browser.newContext({ viewport: { width: 1280, height: 800 }, ...options });
   const page = await context.newPage();
   const faults: string[] = [];
   const own = inject("address");
+  if (office !== undefined) {
+    await context.route(`${OFFICE_HOST}**`, (route) => {
+      const file = new URL(route.request().url()).pathname.replace("/lib/1/hosted/", "");
+      if (office === "absent") return route.abort();
+      return route.fulfill({ path: `node_modules/@microsoft/office-js/dist/${file}` });
+    });
+  }
   page.on("request", (request) => {
     const url = request.url();
+    if (office !== undefined && url.startsWith(OFFICE_HOST)) return;
     if (!url.startsWith(own) && !/^(data|blob|about):/.test(url)) faults.push(`request to ${url}`);
   });
   page.on("pageerror", (error) => faults.push(`script error: ${error.message}`));
   page.on("console", (message) => {
-    if (message.type() === "error") faults.push(`console: ${message.text()}`);
+    // The browser's own word that the script of an absent host did not load.
+    const expected = office === "absent" && message.location().url.startsWith(OFFICE_HOST);
+    if (message.type() === "error" && !expected) faults.push(`console: ${message.text()}`);
   });
   await page.addInitScript(() => {
     document.addEventListener("securitypolicyviolation", (event) => {
