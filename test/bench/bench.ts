@@ -1,8 +1,9 @@
 /** `npm run bench`: ratios measured in one run. Machines differ; ratios hardly do. */
 import { convertLines } from "./convert";
+import { gridLines } from "./grid";
 import { memoryOfMillionReadings } from "./memory";
 
-const lines = await convertLines();
+const lines = [...(await convertLines()), ...(await gridLines())];
 
 console.log("ratio   limit   what");
 for (const { what, ratio, limit } of lines) {
