@@ -1,26 +1,4 @@
-/**
- * The part of the custom-functions runtime that the functions use, made global for tests as the
- * spreadsheet makes it global for them.
- */
-class CellError {
-  constructor(
-    readonly code: string,
-    readonly message?: string,
-  ) {}
-}
+/** Makes the functions' runtime global for tests, as the spreadsheet makes it global for them. */
+import { functionsRuntime } from "../src/catalogue/functions-runtime";
 
-const runtime = {
-  Error: CellError,
-  ErrorCode: {
-    invalidValue: "#VALUE!",
-    notAvailable: "#N/A",
-    divisionByZero: "#DIV/0!",
-    invalidNumber: "#NUM!",
-    nullReference: "#NULL!",
-    invalidName: "#NAME?",
-    invalidReference: "#REF!",
-  },
-  associate(): void {},
-};
-
-Object.assign(globalThis, { CustomFunctions: runtime });
+Object.assign(globalThis, { CustomFunctions: functionsRuntime().CustomFunctions });

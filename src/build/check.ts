@@ -1,6 +1,7 @@
 // What the built functions make of the sample log, in words: the main job seen without a browser.
 
-import { type Cell, loadBuiltFunctions, type Matrix, WorksheetError } from "./built-functions";
+import { WorksheetError } from "../catalogue/functions-runtime";
+import { type Cell, loadBuiltFunctions, type Matrix } from "./built-functions";
 import { type Log, readLog } from "./sample-log";
 
 export interface SampleCheck {
@@ -63,7 +64,7 @@ function grouped(result: Matrix, log: Log): Group[] {
 }
 
 function described(cell: Cell): { kind: string; reason: string } {
-  if (cell instanceof WorksheetError) return { kind: `refused ${cell.code}`, reason: cell.message };
+  if (cell instanceof WorksheetError) return { kind: `refused ${cell.code}`, reason: cell.message ?? "" };
   if (cell === "") return { kind: "blank", reason: "" };
   return { kind: "neither number nor error", reason: String(cell) };
 }

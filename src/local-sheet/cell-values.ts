@@ -7,7 +7,7 @@ import {
   NumberValueObject,
   StringValueObject,
 } from "@univerjs/engine-formula";
-import { WorksheetError } from "./custom-functions-global";
+import { WorksheetError } from "../catalogue/functions-runtime";
 import type { ResultFormat } from "./result-format";
 
 /**

@@ -1,6 +1,6 @@
 import { BaseFunction, type BaseValueObject } from "@univerjs/engine-formula";
+import { WorksheetError, type WorksheetFunction } from "../catalogue/functions-runtime";
 import { toArgument, toEngineValue } from "./cell-values";
-import { WorksheetError, type WorksheetFunction } from "./custom-functions-global";
 import type { ErrorMessages } from "./error-messages";
 import type { FunctionMetadata } from "./function-metadata";
 import type { ResultFormat } from "./result-format";

@@ -1,4 +1,4 @@
-import type { WorksheetError } from "./custom-functions-global";
+import type { WorksheetError } from "../catalogue/functions-runtime";
 
 /** A cell by sheet, row and column, counted from 0. */
 export interface CellPosition {

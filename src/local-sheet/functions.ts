@@ -5,8 +5,8 @@ import {
   IDescriptionService,
   IFunctionService,
 } from "@univerjs/preset-sheets-core";
+import { functionsRuntime, type WorksheetFunction } from "../catalogue/functions-runtime";
 import { readNumbersInArrayConstants } from "./array-constants";
-import { installCustomFunctions } from "./custom-functions-global";
 import { EngineFunction } from "./engine-function";
 import { ErrorMessages } from "./error-messages";
 import { type FunctionMetadata, readMetadata } from "./function-metadata";
@@ -19,11 +19,12 @@ const namespace = "BEAD";
 /** The built functions with their metadata, read from beside the page. */
 export interface BuiltFunctions {
   metadata: FunctionMetadata[];
-  associated: ReturnType<typeof installCustomFunctions>;
+  associated: Map<string, WorksheetFunction>;
 }
 
 export async function loadBuiltFunctions(): Promise<BuiltFunctions> {
-  const associated = installCustomFunctions(globalThis);
+  const { associated, CustomFunctions } = functionsRuntime();
+  Object.assign(globalThis, { CustomFunctions });
   const [metadata] = await Promise.all([readMetadata("functions.json"), loadScript("functions.js")]);
   return { metadata, associated };
 }
@@ -48,7 +49,7 @@ export function registerFunctions(
   switchOffInvertedIndex(CELL_INVERTED_INDEX_CACHE);
   const messages = new ErrorMessages();
   const functions = metadata.map((each) => {
-    const implementation = associated.get(each.id.toUpperCase());
+    const implementation = associated.get(each.id);
     if (!implementation) throw new Error(`functions.js associates no function ${each.id}`);
     return new EngineFunction(`${namespace}.${each.name}`, each, implementation, messages, formatOf(each.id));
   });

@@ -1,7 +1,8 @@
 import { expect, test } from "vitest";
-import { loadBuiltFunctions, WorksheetError } from "../../src/build/built-functions";
+import { loadBuiltFunctions } from "../../src/build/built-functions";
 import { checkSample } from "../../src/build/check";
 import { readLog } from "../../src/build/sample-log";
+import { WorksheetError } from "../../src/catalogue/functions-runtime";
 
 const LOG = `# invented
 time,CH1 mV,CH2 mV,terminal °C

@@ -1,8 +1,9 @@
 import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
-import { loadBuiltFunctions, WorksheetError } from "../../src/build/built-functions";
+import { loadBuiltFunctions } from "../../src/build/built-functions";
 import catalogue from "../../src/catalogue/catalogue.json";
 import { parseExample, parseResult } from "../../src/catalogue/formula";
+import { WorksheetError } from "../../src/catalogue/functions-runtime";
 
 const built = loadBuiltFunctions(readFileSync("dist/functions.js", "utf8"));
 const examples = catalogue.functions.flatMap(({ id, examples }) =>

@@ -7,8 +7,8 @@ import {
   StringValueObject,
 } from "@univerjs/engine-formula";
 import { describe, expect, it } from "vitest";
+import { WorksheetError } from "../../src/catalogue/functions-runtime";
 import { toArgument, toEngineValue } from "../../src/local-sheet/cell-values";
-import { WorksheetError } from "../../src/local-sheet/custom-functions-global";
 
 const array = (...rows: (BaseValueObject | null)[][]) =>
   ArrayValueObject.create({

@@ -1,6 +1,6 @@
 import { type ArrayValueObject, NumberValueObject } from "@univerjs/engine-formula";
 import { describe, expect, it } from "vitest";
-import { WorksheetError, type WorksheetFunction } from "../../src/local-sheet/custom-functions-global";
+import { WorksheetError, type WorksheetFunction } from "../../src/catalogue/functions-runtime";
 import { EngineFunction } from "../../src/local-sheet/engine-function";
 import { ErrorMessages } from "../../src/local-sheet/error-messages";
 
