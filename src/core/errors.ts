@@ -20,6 +20,9 @@ export interface Quantity {
 /** Six significant digits: enough to see by how much a limit was passed, short enough to read. */
 const shortly = (value: number): string => String(Number(value.toPrecision(6)));
 
+/** Rows are counted in whole numbers, and named to the last digit. */
+const counted = (value: number): string => (Number.isInteger(value) ? String(value) : shortly(value));
+
 /** A temperature held in °C. */
 export const degrees = (value: number): Quantity => ({
   print: (unit) => `${shortly(fromCelsius(value, unit))} ${unit.label}`,
@@ -64,7 +67,7 @@ function parts(strings: TemplateStringsArray, values: readonly Printable[]): Par
   return strings.flatMap((text, index) => {
     const value = values[index];
     if (value === undefined) return [text];
-    return [text, typeof value === "number" ? shortly(value) : value];
+    return [text, typeof value === "number" ? counted(value) : value];
   });
 }
 

@@ -35,5 +35,47 @@ export { CALTEMPERATURE } from "./correct/caltemperature";
 export { CALEMF } from "./correct/calemf";
 export { CALDRIFT } from "./correct/caldrift";
 
+// Judge
+export { TOLERANCE } from "./judge/tolerance";
+export { CABLETOLERANCE } from "./judge/cabletolerance";
+export { ACCEPTANCE } from "./judge/acceptance";
+export { VERDICT } from "./judge/verdict";
+export { CONFORMITY } from "./judge/conformity";
+export { STATEMENT } from "./judge/statement";
+export { CLASSMET } from "./judge/classmet";
+export { CHECKTABLE } from "./judge/checktable";
+export { ENSCORE } from "./judge/enscore";
+
+// Weigh
+export { TYPEA } from "./weigh/typea";
+export { STANDARDU } from "./weigh/standardu";
+export { COMBINEDU } from "./weigh/combinedu";
+export { EFFECTIVEDOF } from "./weigh/effectivedof";
+export { COVERAGE } from "./weigh/coverage";
+export { BUDGET } from "./weigh/budget";
+export { TEMPERATUREU } from "./weigh/temperatureu";
+export { SIMULATEU } from "./weigh/simulateu";
+export { REPORTVALUE } from "./weigh/reportvalue";
+
+// Screen
+export { TIMELINE } from "./screen/timeline";
+export { FLAGS } from "./screen/flags";
+export { DESPIKE } from "./screen/despike";
+export { RAMPRATE } from "./screen/ramprate";
+export { TIMECONSTANT } from "./screen/timeconstant";
+export { UNLAG } from "./screen/unlag";
+
+// Survey
+export { SOAK } from "./survey/soak";
+export { SURVEY } from "./survey/survey";
+export { SURVEYSENSORS } from "./survey/surveysensors";
+export { ENVELOPE } from "./survey/envelope";
+export { SURVEYCLASS } from "./survey/surveyclass";
+export { SYSTEMCHECK } from "./survey/systemcheck";
+export { TIMEABOVE } from "./survey/timeabove";
+export { LETHALITY } from "./survey/lethality";
+export { MEANKINETIC } from "./survey/meankinetic";
+
 // Record
+export { WORKING } from "./record/working";
 export { PROVENANCE } from "./record/provenance";

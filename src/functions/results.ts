@@ -45,6 +45,26 @@ export const resistanceResult: ResultKind = { name: "resistance", unit: "Ω", wr
 /** A date serial of the workbook. */
 export const dateResult: ResultKind = { name: "date", write: asItIs };
 
+/** A time of a log, in the unit in which the log gives it. */
+export const timeResult: ResultKind = { name: "time", write: asItIs };
+
+export const durationResult: ResultKind = { name: "duration", unit: "min", write: asItIs };
+
+export const secondsResult: ResultKind = { name: "time constant", unit: "s", write: asItIs };
+
+/** Temperatures of functions that work in whatever degrees the sheet holds. */
+export const sheetTemperatureResult: ResultKind = { name: "temperature", write: asItIs };
+
+export const sheetDifferenceResult: ResultKind = { name: "temperature difference", write: asItIs };
+
+export const rampRateResult: ResultKind = { name: "rate", unit: "degrees/min", write: asItIs };
+
+/** Degrees of difference per hour. */
+export const differencePerHourResult: ResultKind = { ...differenceResult, name: "drift", unit: "°C/h" };
+
+/** 0 to 1. */
+export const shareResult: ResultKind = { name: "share", write: asItIs };
+
 export const numberResult: ResultKind = { name: "number", write: asItIs };
 
 export const wordResult: ResultKind = { name: "text", write: asItIs };

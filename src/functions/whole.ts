@@ -2,7 +2,7 @@
  * Functions of a whole call: one value, or a table that spills with a header row and
  * whose parts other cells can ask for by name (rule 10 of the contract).
  */
-import { Refusal, type TemperatureUnit } from "../core";
+import { noAnswer, Refusal, type TemperatureUnit } from "../core";
 import { type Arguments, type Given, readGiven, unitOfCall, type Values } from "./arguments";
 import { type CellError, error } from "./cell";
 import { type Declaration, declare, type WorksheetFunction } from "./declaration";
@@ -10,7 +10,16 @@ import { failure } from "./failure";
 import type { ResultKind } from "./results";
 
 type Cell = number | string | CellError;
-export type Entry = number | string | Refusal;
+/** An error is that of an input cell, passed through. */
+export type Entry = number | string | Refusal | CellError;
+
+/** Only input that no instrument gives can come to this; a number out of range is never shown. */
+const tooLarge = noAnswer`the result is too large for a number`;
+
+function cellOf(entry: Entry, unit: TemperatureUnit): Cell {
+  if (entry instanceof Refusal) return failure(entry, unit);
+  return typeof entry === "number" && !Number.isFinite(entry) ? failure(tooLarge, unit) : entry;
+}
 
 export interface Whole<A extends Arguments> extends Declaration {
   readonly arguments: A;
@@ -37,11 +46,11 @@ export function whole<const A extends Arguments>(
     const rows = spec.cells(values as Values<A>, unit);
     if (rows instanceof Refusal) return [[failure(rows, unit)]];
     if (rows.length === 0) return [[error("#N/A", "the result has no rows")]];
-    return rows.map((row) => row.map((entry) => (entry instanceof Refusal ? failure(entry, unit) : entry)));
+    return rows.map((row) => row.map((entry) => cellOf(entry, unit)));
   };
 }
 
-const written = (entry: Entry, kind: ResultKind, unit: TemperatureUnit): Entry =>
+export const written = (entry: Entry, kind: ResultKind, unit: TemperatureUnit): Entry =>
   typeof entry === "number" ? kind.write(entry, unit) : entry;
 
 export interface Table<A extends Arguments, C extends string> {

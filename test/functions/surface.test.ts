@@ -35,6 +35,47 @@ const SURFACE: Readonly<Record<string, string>> = {
   CALTEMPERATURE: "emf, type, coefficients, low, high, referenceTemperature, [referenceBy], [unit]",
   CALEMF: "temperature, type, coefficients, low, high, [referenceTemperature], [referenceBy], [unit]",
   CALDRIFT: "points, firstValues, secondValues, firstDate, secondDate, [limits], [column], [unit]",
+  TOLERANCE: "temperature, type, toleranceClass, [expressedIn], [unit]",
+  CABLETOLERANCE: "cable, toleranceClass, [expressedIn], [temperature], [unit]",
+  ACCEPTANCE: "limit, expandedUncertainty, [rule]",
+  VERDICT: "error, limit, [expandedUncertainty], [rule], [lower]",
+  CONFORMITY: "value, upper, standardUncertainty, [lower]",
+  STATEMENT: "error, limit, expandedUncertainty, [rule], [k], [unit]",
+  CLASSMET: "temperatures, errors, type, [standard], [unit]",
+  CHECKTABLE:
+    "reference, readings, type, toleranceClass, [expandedUncertainty], [rule], [names], [limits], [column], [unit]",
+  ENSCORE: "value, expandedUncertainty, referenceValue, referenceUncertainty",
+  TYPEA: "readings, [metric]",
+  STANDARDU: "value, distribution, [divisor]",
+  COMBINEDU: "uncertainties, [sensitivities], [correlations]",
+  EFFECTIVEDOF: "uncertainties, degreesOfFreedom, [sensitivities]",
+  COVERAGE: "degreesOfFreedom, [probability]",
+  BUDGET: "lines, [probability], [metric]",
+  TEMPERATUREU:
+    "temperature, type, uEmfUv, uReference, referenceTemperature, [uOther], [inhomogeneity], [unit]",
+  SIMULATEU:
+    "emf, type, referenceTemperature, uEmfUv, uReference, [uOther], [trials], [seed], [metric], [unit]",
+  REPORTVALUE: "value, expandedUncertainty, [digits]",
+  TIMELINE: "times, [column]",
+  FLAGS: "readings, low, high, [maxStep], [stuckCount], [spikeWidth]",
+  DESPIKE: "readings, [halfWindow], [threshold]",
+  RAMPRATE: "times, temperatures, [windowMinutes], [timeUnit]",
+  TIMECONSTANT: "times, temperatures, [timeUnit], [metric]",
+  UNLAG: "times, temperatures, timeConstant, [windowMinutes], [timeUnit]",
+  SOAK: "times, readings, setpoint, tolerance, [corrections], [maxGap], [timeUnit], [metric]",
+  SURVEY:
+    "times, readings, setpoint, tolerance, [corrections], [names], [start], [end], [requiredMinutes], [maxGap], [timeUnit], [metric], [unit]",
+  SURVEYSENSORS:
+    "times, readings, setpoint, tolerance, [corrections], [names], [start], [end], [timeUnit], [column], [unit]",
+  ENVELOPE: "readings, [corrections], [column]",
+  SURVEYCLASS: "deviation, [unit]",
+  SYSTEMCHECK: "indicated, testReading, sensorCorrection, instrumentCorrection",
+  TIMEABOVE: "times, temperatures, threshold, [maxGap], [timeUnit]",
+  LETHALITY:
+    "times, temperatures, referenceTemperature, z, [threshold], [method], [maxGap], [timeUnit], [metric], [unit]",
+  MEANKINETIC: "temperatures, [activationEnergy], [times], [timeUnit], [unit]",
+  WORKING:
+    "emf, type, referenceTemperature, [points], [values], [givenAs], [method], [pointsAre], [column], [unit]",
   PROVENANCE: "[metric]",
 };
 

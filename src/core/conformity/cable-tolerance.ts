@@ -38,7 +38,7 @@ function find(designation: string, className: string): Found | Refusal {
     if (tolerance !== undefined) return { designation: name, cable, tolerance };
     offered.push(...cableClassNames.filter((known) => cable.classes[known] !== undefined));
   }
-  return noAnswer`${name} has no class ${asked}: it has ${offered.join(", ")}`;
+  return noAnswer`${name} has no class ${asked}: it has class ${offered.join(", ")}`;
 }
 
 /**

@@ -54,17 +54,17 @@ function misshapen({ references, readings, limits, uncertainty, names }: Check):
   if (points === 0 || readings.length === 0) return noAnswer`no readings to check`;
   for (const column of readings) {
     if (column.length !== points) {
-      return wrongKind`${column.length} rows of readings for ${points} reference temperatures`;
+      return wrongKind`rows of readings: ${column.length} for ${points} reference temperatures`;
     }
   }
   if (!(limits instanceof ToleranceClass) && typeof limits !== "number" && limits.length !== points) {
-    return wrongKind`${limits.length} limits for ${points} reference temperatures`;
+    return wrongKind`limits: ${limits.length} for ${points} reference temperatures`;
   }
   if (typeof uncertainty === "object" && uncertainty.length !== points) {
-    return wrongKind`${uncertainty.length} expanded uncertainties for ${points} reference temperatures`;
+    return wrongKind`expanded uncertainties: ${uncertainty.length} for ${points} reference temperatures`;
   }
   if (names !== undefined && names.length !== readings.length) {
-    return wrongKind`${names.length} names for ${readings.length} couples`;
+    return wrongKind`names: ${names.length} for ${readings.length} couples`;
   }
   return undefined;
 }

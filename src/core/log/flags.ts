@@ -18,6 +18,9 @@ export interface FlagLimits {
   readonly spikeWidth?: number | undefined;
 }
 
+/** Scans of a spike width: what stays away for longer is a step. */
+const WIDEST = 1000;
+
 /** Prepared limits, for any number of columns. */
 export type Flagger = (readings: Float64Array) => Flag[];
 
@@ -38,8 +41,11 @@ export function flagger(limits: FlagLimits): Flagger | Refusal {
   if (stuckCount !== undefined && !(Number.isInteger(stuckCount) && stuckCount >= 2)) {
     return wrongKind`stuck count ${stuckCount} is no whole number from 2 up`;
   }
-  if (spikeWidth !== undefined && !(Number.isInteger(spikeWidth) && spikeWidth >= 1)) {
-    return wrongKind`spike width ${spikeWidth} is no whole number from 1 up`;
+  if (
+    spikeWidth !== undefined &&
+    !(Number.isInteger(spikeWidth) && spikeWidth >= 1 && spikeWidth <= WIDEST)
+  ) {
+    return wrongKind`spike width ${spikeWidth} is no whole number from 1 to ${WIDEST}`;
   }
   if (spikeWidth !== undefined && maxStep === undefined) {
     return wrongKind`a spike width needs a max step, which says how far a spike jumps`;

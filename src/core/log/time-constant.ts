@@ -17,6 +17,8 @@ export interface StepResponse {
 
 const SECONDS_PER_MINUTE = 60;
 const FEWEST_READINGS = 6;
+/** A step needs no more, and the fit of a longer record would take minutes. */
+const MOST_READINGS = 20_000;
 /** Readings that the response itself must have: its three parameters, and two to tell scatter from curve. */
 const FEWEST_IN_RESPONSE = 5;
 /** In so short a part of an interval a response is over before the next reading (e⁻⁵ < 1 %). */
@@ -36,7 +38,7 @@ const PLACES = 64;
 
 /**
  * Fits a + b·exp(−t/τ) to a recorded step, rising or falling. Level readings before the step are found and left out
- * of the curve. Missing readings (NaN) are left out. Refused: fewer than 6 readings, no step that stands out of the
+ * of the curve. Missing readings (NaN) are left out. Refused: fewer than 6 readings or more than 20 000, no step that stands out of the
  * scatter or of the logger's resolution, a step over within one interval, a record too short to show it settle, and a
  * time constant whose uncertainty is more than half of it.
  */
@@ -47,6 +49,9 @@ export function timeConstant(grid: TimeGrid, temperatures: Float64Array): StepRe
   const record = new Step(grid.times.filter(present), temperatures.filter(present));
   if (record.count < FEWEST_READINGS) {
     return noAnswer`${record.count} readings are too few to fit a step: at least ${FEWEST_READINGS}`;
+  }
+  if (record.count > MOST_READINGS) {
+    return noAnswer`${record.count} readings are too many to fit a step: cut the record to the step, at most ${MOST_READINGS}`;
   }
   if (!(record.span > 0)) return noAnswer`the times never rise`;
   const from = record.start();

@@ -31,9 +31,9 @@ export function timeline(times: Float64Array): Timeline | Refusal {
   const rows = presentRows(times);
   if (rows.length < 2) return noAnswer`a timeline needs at least 2 times`;
   const interval = medianInterval(times.filter((time) => !Number.isNaN(time)));
-  if (Number.isNaN(interval)) return noAnswer`the times never rise`;
   if (newestFirst(times, rows))
     return noAnswer`the times fall from row to row: sort the log, oldest scan first`;
+  if (Number.isNaN(interval)) return noAnswer`the times never rise`;
   const added = new Float64Array(times.length);
   const repairs = new Array<string>(times.length).fill("");
   let shift = 0;
@@ -86,5 +86,6 @@ function newestFirst(times: Float64Array, rows: readonly number[]): boolean {
     if (step < 0) falls++;
     else if (step > 0) rises++;
   }
-  return falls > rises;
+  // A single fall may be midnight.
+  return falls > 1 && falls > rises;
 }

@@ -20,6 +20,8 @@ export interface BudgetLine {
   readonly sensitivity?: number | undefined;
   /** Infinite when undefined. */
   readonly dof?: number | undefined;
+  /** The row that a refusal names, from 1; the place among the lines when undefined. */
+  readonly row?: number;
 }
 
 export interface BudgetRow {
@@ -60,7 +62,7 @@ export function budget(lines: readonly BudgetLine[], probability = TWO_SIGMA): B
   const evaluated: UnsharedRow[] = [];
   for (const [i, line] of lines.entries()) {
     const row = evaluate(line);
-    if (row instanceof Refusal) return inRow(i, row, line.name);
+    if (row instanceof Refusal) return inRow((line.row ?? i + 1) - 1, row, line.name);
     evaluated.push(row);
   }
   const contributions = evaluated.map(({ contribution }) => contribution);

@@ -20,6 +20,8 @@ export interface Argument<T, S extends Shape = Shape, Optional extends boolean =
   readonly standIn?: T;
   /** `standIn` as the catalogue prints it. */
   readonly printed?: string;
+  /** Beside a value a blank cell means "not given", as if the argument were left out, and not "missing". */
+  readonly blankIsNotGiven?: true;
   /** Reads the whole range at once. `label` is the argument's name in words. */
   read(given: Matrix, label: string, unit: TemperatureUnit): T | Refusal | CellError;
 }
@@ -49,4 +51,13 @@ export const ifGiven = <T, S extends Shape>(
 ): Argument<T | undefined, S, true> => ({
   ...argument,
   optional: true,
+});
+
+/** May be left out, or be blank beside a value (rule 4); the function then sees undefined. */
+export const ifGivenOrBlank = <T>(
+  argument: Argument<T, "each", false>,
+): Argument<T | undefined, "each", true> => ({
+  ...argument,
+  optional: true,
+  blankIsNotGiven: true,
 });

@@ -14,7 +14,7 @@ function readOne<T>(raw: unknown, kind: Kind<T>, label: string, unit: Temperatur
   return reading.kind === "blank" ? undefined : kind.read(reading.value, label, unit);
 }
 
-const failed = (value: unknown): value is Refusal | CellError =>
+export const failed = (value: unknown): value is Refusal | CellError =>
   value instanceof Refusal || value instanceof CustomFunctions.Error;
 
 function readAll<T>(

@@ -24,5 +24,14 @@ export const once = <T>(kind: Kind<T>): Argument<T, "once", false> => ({
   read: single(kind),
 });
 
+/** One cell for the whole call that may be blank; the function then sees undefined. */
+export const onceOrBlank = <T>(kind: Kind<T>): Argument<T | undefined, "once", false> => ({
+  ...once<T | undefined>(kind),
+  read(given, label, unit) {
+    const alone = rowsOf(given) === 1 && columnsOf(given) === 1;
+    return alone && readCell(given[0]?.[0]).kind === "blank" ? undefined : single(kind)(given, label, unit);
+  },
+});
+
 /** One cell or a range, cell by cell: `cellwise` reads it, and only a left-out one is read here. */
 export const each = <T>(kind: Kind<T>): Argument<T, "each", false> => ({ ...once(kind), shape: "each" });

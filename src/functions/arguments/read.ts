@@ -5,10 +5,23 @@ import { failure } from "../failure";
 import { asMatrix, columnsOf, rowsOf } from "../matrix";
 import type { Argument, Arguments } from "./argument";
 
+/** A function without the argument works in whatever degrees the sheet holds, and its messages do not say which. */
+const inTheSheetsDegrees: TemperatureUnit = { ...celsius, label: "degrees" };
+
 export const isLeftOut = (given: unknown): boolean => given === null || given === undefined;
+
+/** Names that read badly when they are only taken apart. */
+const IN_WORDS: Readonly<Record<string, string>> = {
+  lower: "lower limit",
+  upper: "upper limit",
+  uEmfUv: "uncertainty of the EMF",
+  uReference: "uncertainty of the reference temperature",
+  uOther: "other uncertainty",
+};
 
 /** An argument's name in words: referenceTemperature → reference temperature. */
 export const inWords = (name: string): string =>
+  IN_WORDS[name] ??
   name
     .replace(/([a-z])([A-Z])/g, (_, before: string, after: string) => `${before} ${after.toLowerCase()}`)
     .replace(/^emf\b/, "EMF");
@@ -38,6 +51,6 @@ export function unitOfCall(
 ): TemperatureUnit | CellError {
   const argument = declared.unit;
   return argument === undefined
-    ? celsius
+    ? inTheSheetsDegrees
     : (readGiven("unit", argument, given.unit, celsius) as TemperatureUnit | CellError);
 }

@@ -29,7 +29,7 @@ interface Ranged {
   readonly matrix: Matrix;
   /** For numbers: from the sheet to core units. */
   readonly scale: Scale | undefined;
-  /** The last word that was read and what it meant: a column of types rarely changes. */
+  /** The last word or number that was read and what it meant: a column of types or classes rarely changes. */
   lastRaw: unknown;
   lastValue: unknown;
 }
@@ -87,7 +87,7 @@ export class Call<A extends Arguments, P> {
       const raw = cellAt(ranged.matrix, row, column);
       if (typeof raw === "number" && ranged.scale !== undefined && Number.isFinite(raw)) {
         values[ranged.name] = (raw - ranged.scale.zero) * ranged.scale.factor;
-      } else if (raw === ranged.lastRaw && typeof raw === "string") {
+      } else if (raw !== undefined && raw === ranged.lastRaw) {
         values[ranged.name] = ranged.lastValue;
       } else {
         return this.careful(row, column);
@@ -124,7 +124,11 @@ export class Call<A extends Arguments, P> {
     if (readings[0]?.kind === "blank") return "";
     for (const [index, ranged] of this.ranged.entries()) {
       const reading = readings[index] as Reading;
-      if (reading.kind !== "present") return error("#N/A", `${ranged.label} missing`);
+      if (reading.kind !== "present") {
+        if (ranged.argument.blankIsNotGiven !== true) return error("#N/A", `${ranged.label} missing`);
+        this.values[ranged.name] = undefined;
+        continue;
+      }
       const value = ranged.argument.kind.read(reading.value, ranged.label, this.unit);
       if (value instanceof Refusal) return failure(value, this.unit);
       if (ranged.scale === undefined) {

@@ -12,4 +12,17 @@ export const resistance = plainNumber("resistance", "Ω");
 /** A date or a date with a time, as the workbook's serial number. */
 export const date = plainNumber("date");
 
+/** A time of a log: a date-time serial, or what the call's time unit says. */
+export const time = plainNumber("time");
+
+export const minutes = plainNumber("duration", "min");
+
+export const seconds = plainNumber("time constant", "s");
+
+/** A temperature of a function that works in whatever degrees the sheet holds. */
+export const sheetTemperature = plainNumber("temperature");
+
+/** A difference or rate of such temperatures. */
+export const sheetDifference = plainNumber("temperature difference");
+
 export const number = plainNumber("number");

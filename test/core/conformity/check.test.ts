@@ -142,16 +142,16 @@ describe("checkTable", () => {
 
   it("refuses columns that do not fit each other", () => {
     expect(message(checkTable({ references: [1, 2], readings: [[1]], limits: 1 }))).toBe(
-      "1 rows of readings for 2 reference temperatures",
+      "rows of readings: 1 for 2 reference temperatures",
     );
     expect(message(checkTable({ references: [1, 2], readings: [[1, 2]], limits: [1] }))).toBe(
-      "1 limits for 2 reference temperatures",
+      "limits: 1 for 2 reference temperatures",
     );
     expect(message(checkTable({ references: [1], readings: [[1]], limits: 1, names: ["a", "b"] }))).toBe(
-      "2 names for 1 couples",
+      "names: 2 for 1 couples",
     );
     expect(message(checkTable({ references: [1], readings: [[1]], limits: 1, uncertainty: [] }))).toBe(
-      "0 expanded uncertainties for 1 reference temperatures",
+      "expanded uncertainties: 0 for 1 reference temperatures",
     );
     expect(message(checkTable({ references: [], readings: [], limits: 1 }))).toBe("no readings to check");
   });

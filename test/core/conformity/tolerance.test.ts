@@ -179,9 +179,9 @@ describe("cable tolerances", () => {
   it("say what a cable has", () => {
     const lacking = refusal(cableToleranceUv("KCA", "1"));
     expect(lacking.kind).toBe("no answer");
-    expect(lacking.message()).toBe("KCA has no class 1: it has 2");
+    expect(lacking.message()).toBe("KCA has no class 1: it has class 2");
     expect(refusal(cableToleranceUv("SX", "special")).message()).toBe(
-      "SX has no class special: it has standard",
+      "SX has no class special: it has class standard",
     );
     expect(refusal(cableToleranceUv("KX", "3")).kind).toBe("wrong kind");
     const unknown = refusal(cableToleranceUv("QX", "1"));

@@ -59,6 +59,11 @@ describe("budget", () => {
     expect(refused.message().startsWith(words)).toBe(true);
   });
 
+  it("names the row that a line says it was typed in", () => {
+    const line = { name: "drift", value: -1, distribution: "rectangular", row: 7 };
+    expect(message(budget([line]))).toMatch(/^row 7 \(drift\): value -1 is below 0/);
+  });
+
   it("refuses a budget of nothing", () => {
     expect(message(budget([]))).toBe("the budget has no lines");
     expect(message(budget([{ name: "a", value: 0, distribution: "rectangular" }]))).toBe(
