@@ -1,5 +1,5 @@
-import { BooleanNumber, HorizontalAlign, type IStyleData } from "@univerjs/core";
-import type { NewSheet, SheetColumn } from "./workbook";
+import { BooleanNumber, HorizontalAlign, type IStyleData, VerticalAlign, WrapStrategy } from "@univerjs/core";
+import { type CellRole, type FormatName, numberFormats } from "../sheets";
 
 /** Colours of look.md for light paper; in the dark the engine turns them over itself. */
 const ink = { rgb: "#24262b" };
@@ -12,28 +12,34 @@ const textPadding = { l: 8 };
 /** Styles by a name that says all of them: cells hold the name alone, so a long column costs one style. */
 export type CellStyles = Record<string, IStyleData>;
 
-export const headStyles = {
-  title: { bl: BooleanNumber.TRUE, fs: 14, cl: ink, ht: HorizontalAlign.LEFT },
-  note: { cl: muted, ht: HorizontalAlign.LEFT },
-  header: { bl: BooleanNumber.TRUE, cl: ink, ht: HorizontalAlign.RIGHT },
-  "text header": { bl: BooleanNumber.TRUE, cl: ink, ht: HorizontalAlign.LEFT, pd: textPadding },
-} satisfies CellStyles;
+const bold = { bl: BooleanNumber.TRUE, cl: ink };
 
-/** The style of a cell above the readings. */
-export function headStyle(sheet: NewSheet, row: number, column: SheetColumn | undefined): string {
-  const notes = sheet.noteRows ?? 0;
-  if (row < notes) return row === 0 && sheet.hasTitle ? "title" : "note";
-  return column?.numberFormat ? "header" : "text header";
-}
+const roles: Record<CellRole, IStyleData> = {
+  title: { ...bold, fs: 14 },
+  note: { cl: muted },
+  heading: bold,
+  label: { cl: ink },
+  header: bold,
+  input: { cl: slate },
+  result: { cl: ink },
+  verdict: bold,
+  example: { cl: ink },
+};
 
-export const bodyStyleName = ({ role = "input", numberFormat = "text" }: SheetColumn): string =>
-  `${role} ${numberFormat}`;
+/** These stand at the left edge, where a line of them begins. */
+const unpadded: ReadonlySet<CellRole> = new Set(["title", "note", "heading"]);
+
+export const styleName = (role: CellRole, format: FormatName = "general"): string => `${role} ${format}`;
 
 /** Numbers to the right, so that their decimal marks stand under one another; texts to the left. */
-export function bodyStyle({ role = "input", numberFormat }: SheetColumn): IStyleData {
+export function cellStyle(role: CellRole, format: FormatName = "general"): IStyleData {
+  const pattern = numberFormats[format];
   return {
-    cl: role === "input" ? slate : ink,
-    ...(numberFormat ? { ht: HorizontalAlign.RIGHT } : { ht: HorizontalAlign.LEFT, pd: textPadding }),
-    ...(numberFormat && numberFormat !== "General" ? { n: { pattern: numberFormat } } : {}),
+    ...roles[role],
+    ...(format === "paragraph" ? { tb: WrapStrategy.WRAP, vt: VerticalAlign.TOP } : {}),
+    ...(format === "text" || format === "paragraph"
+      ? { ht: HorizontalAlign.LEFT, ...(unpadded.has(role) ? {} : { pd: textPadding }) }
+      : { ht: HorizontalAlign.RIGHT }),
+    ...(pattern === "General" || role === "header" ? {} : { n: { pattern } }),
   };
 }

@@ -1,54 +1,77 @@
 import { CellValueType, type ICellData, type IWorksheetData } from "@univerjs/core";
-import { parseCell } from "./address";
-import { bodyStyle, bodyStyleName, type CellStyles, headStyle, headStyles } from "./cell-styles";
-import type { CellValue, NewSheet } from "./workbook";
+import type { CellRole, CellValue, FilledSheet, FormatName, PlannedCell } from "../sheets";
+import { type CellStyles, cellStyle, styleName } from "./cell-styles";
 
 const spareRows = 100;
 const leastColumns = 20;
 const spareColumns = 8;
+const mostRows = 1_048_576;
 
 export interface SheetData {
   sheet: Partial<IWorksheetData>;
   styles: CellStyles;
 }
 
-/** A sheet as the grid engine stores it, with spare rows and columns around it and its header frozen. */
-export function toSheetData(id: string, sheet: NewSheet): SheetData {
-  const bodyStyles = sheet.columns.map(bodyStyleName);
-  const cellData: IWorksheetData["cellData"] = {};
-  sheet.rows.forEach((row, index) => {
+/** A planned sheet as the grid engine stores it, with spare rows and columns around it and its header frozen. */
+export function toSheetData(id: string, sheet: FilledSheet): SheetData {
+  const cellData: Record<number, Record<number, ICellData>> = {};
+  const styles: CellStyles = {};
+  const styled = (role: CellRole, format?: FormatName): string => {
+    const name = styleName(role, format);
+    styles[name] ??= cellStyle(role, format);
+    return name;
+  };
+  const columns = sheet.columns.map(({ role = "input", format }) => styled(role, format));
+  let rows = 0;
+  const put = (row: number, column: number, cell: ICellData) => {
+    rows = Math.max(rows, row + 1);
+    cellData[row] ??= {};
+    cellData[row][column] = cell;
+  };
+
+  const { readings } = sheet;
+  if (readings) rows = readings.row + readings.rows.length;
+  readings?.rows.forEach((values, i) => {
     const cells: Record<number, ICellData> = {};
-    const isHead = index < sheet.headerRows;
-    row.forEach((value, column) => {
+    values.forEach((value, c) => {
       // An empty field stays a truly empty cell: ISBLANK must be able to tell.
       if (value === null) return;
-      const cell = toCell(value);
-      cell.s = isHead ? headStyle(sheet, index, sheet.columns[column]) : (bodyStyles[column] ?? null);
-      cells[column] = cell;
+      const column = readings.column + c;
+      cells[column] = { ...toCell(value), s: columns[column] ?? null };
     });
-    cellData[index] = cells;
+    cellData[readings.row + i] = cells;
   });
-  for (const [cell, formula] of Object.entries(sheet.formulas ?? {})) {
-    const { row, column } = parseCell(cell);
-    cellData[row] = { ...cellData[row], [column]: { f: formula, s: bodyStyles[column] ?? null } };
+  for (const { row, column, spill: [down, across] = [1, 1] } of sheet.cells) {
+    if (down * across === 1) continue;
+    for (let r = row; r < row + down; r++) {
+      for (let c = column; c < column + across; c++) put(r, c, { s: columns[c] ?? null });
+    }
   }
+  for (const cell of sheet.cells) {
+    put(cell.row, cell.column, { ...content(cell), s: styled(cell.role, cell.format) });
+  }
+
+  const frozen = { xSplit: 0, ySplit: sheet.frozenRows, startRow: sheet.frozenRows, startColumn: -1 };
   return {
     sheet: {
       id,
       name: sheet.name,
       cellData,
-      rowCount: Math.min(sheet.rows.length + spareRows, 1_048_576),
+      rowCount: Math.min(rows + spareRows, mostRows),
       columnCount: Math.max(sheet.columns.length + spareColumns, leastColumns),
       defaultColumnWidth: 96,
       defaultRowHeight: 24,
       columnData: Object.fromEntries(sheet.columns.map((column, index) => [index, { w: column.width }])),
-      freeze: { xSplit: 0, ySplit: sheet.headerRows, startRow: sheet.headerRows, startColumn: -1 },
+      rowData: Object.fromEntries((sheet.heights ?? []).map(({ row, height }) => [row, { h: height }])),
+      freeze: frozen,
     },
-    styles: {
-      ...headStyles,
-      ...Object.fromEntries(sheet.columns.map((column, index) => [bodyStyles[index], bodyStyle(column)])),
-    },
+    styles,
   };
+}
+
+function content({ value, formula }: PlannedCell): ICellData {
+  if (formula !== undefined) return { f: formula };
+  return value === undefined ? {} : toCell(value);
 }
 
 function toCell(value: CellValue): ICellData {

@@ -34,6 +34,12 @@ export class SpilledResults {
     return undefined;
   }
 
+  /** The rectangle that a cell's formula fills; undefined where it fills its own cell only. */
+  areaOf({ sheetId, row, column }: CellPosition): IRange | undefined {
+    const rectangles = this.#model.getArrayFormulaRange()[this.#unitId]?.[sheetId];
+    return (rectangles?.[row]?.[column] as IRange | undefined) ?? undefined;
+  }
+
   #formulaAt(sheetId: string, row: number, column: number): string | undefined {
     return this.#model.getFormulaStringByCell(row, column, sheetId, this.#unitId) || undefined;
   }

@@ -1,36 +1,38 @@
 import type { Catalogue } from "../catalogue/catalogue";
-import type { CellValue, NewSheet } from "./workbook";
+import { cellName, SheetDraft, type SheetPlan } from "../sheets";
+
+const firstLine = 3;
 
 /** One line for each example that answers in one cell and reads no other: a place to change numbers and see. */
-export function trySheet(catalogue: Catalogue): NewSheet {
-  const rows: (CellValue | null)[][] = [
-    ["Try it"],
-    [
+export function trySheet(catalogue: Catalogue): SheetPlan {
+  const columns = [
+    { width: 152, format: "text" },
+    { width: 112, format: "general", role: "result" },
+    { width: 16 },
+    { width: 420, format: "text" },
+  ] as const;
+  const sheet = new SheetDraft("Try it", columns, firstLine)
+    .title("Try it")
+    .notes(
+      "A2",
       "Examples of the functions, one in each row. Change a formula in column B, or type =BEAD. in an empty cell.",
-    ],
-    ["Function", "Result", null, "Formula"],
-  ];
-  const formulas: Record<string, string> = {};
+    )
+    .headers("A3", [
+      ["Function", "text"],
+      ["Result", "general"],
+    ])
+    .headers("D3", [["Formula", "text"]]);
+  let row = firstLine;
   for (const { id, examples } of catalogue.functions) {
     const example = examples.find(({ formula, result }) => isOneNumber(result) && !readsCells(formula));
     if (!example) continue;
-    rows.push([id, null, null, example.formula]);
-    formulas[`B${rows.length}`] = example.formula;
+    sheet
+      .labels(cellName(row, 0), id)
+      .result(cellName(row, 1), example.formula, "general")
+      .examples(cellName(row, 3), example.formula);
+    row++;
   }
-  return {
-    name: "Try it",
-    rows,
-    formulas,
-    columns: [
-      { width: 152 },
-      { width: 112, numberFormat: "General", role: "result" },
-      { width: 16 },
-      { width: 420 },
-    ],
-    headerRows: 3,
-    noteRows: 2,
-    hasTitle: true,
-  };
+  return sheet.plan();
 }
 
 const isOneNumber = (result: string) => /^[-−]?\d+(\.\d+)?$/.test(result.trim());

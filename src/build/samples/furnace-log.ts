@@ -10,6 +10,7 @@ import {
   terminalTemperature,
 } from "./furnace";
 import { noise, sfc32 } from "./generator";
+import { logTime } from "./log-time";
 
 export const FURNACE_LOG_PATH = "samples/furnace-log.csv";
 
@@ -24,6 +25,8 @@ const CHANNELS = [
 ];
 const NOISE_MV = 0.008;
 
+export const CHANNEL_COUNT = CHANNELS.length;
+
 /** Scans count from 1; each fault covers its first and last scan. */
 export const FAULTS = {
   blank: { first: 421, last: 446 },
@@ -31,11 +34,12 @@ export const FAULTS = {
   text: { channel: 2, scan: 1501, written: "fault" },
 };
 
-const HEAD = [
-  "# INVENTED DATA for trying out worksheet functions: no such furnace and no such works exist.",
-  "# Nonesuch Works / furnace 3 / load 0417 / four type K couples / a scan every 30 s",
-  "# mV as measured at the logger's terminals (not compensated); terminal °C is the reference junction.",
-  "# Faults put in on purpose: a blank stretch; CH3 open for a while (99.999); one text cell in CH2.",
+/** What the file says of itself, and the sheet too. */
+export const LOG_NOTES = [
+  "INVENTED DATA for trying out worksheet functions: no such furnace and no such works exist.",
+  "Nonesuch Works / furnace 3 / load 0417 / four type K couples / a scan every 30 s",
+  "mV as measured at the logger's terminals (not compensated); terminal °C is the reference junction.",
+  "Faults put in on purpose: a blank stretch; CH3 open for a while (99.999); one text cell in CH2.",
 ];
 
 /** The whole file as text. */
@@ -45,7 +49,7 @@ export function furnaceLog(): string {
   const uniform = sfc32(SEED);
   const chamber = chamberTemperatures();
   const junctions = CHANNELS.map(() => chamber[0] ?? 0);
-  const lines = [...HEAD, "time,CH1 mV,CH2 mV,CH3 mV,CH4 mV,terminal °C"];
+  const lines = [...LOG_NOTES.map((note) => `# ${note}`), "time,CH1 mV,CH2 mV,CH3 mV,CH4 mV,terminal °C"];
   for (let scan = 1; scan <= SCANS; scan++) {
     const now = chamber[scan - 1] ?? 0;
     const terminal = terminalTemperature(scan, noise(uniform));
@@ -77,8 +81,5 @@ function writtenInstead(scan: number, channel: number): string | undefined {
   return undefined;
 }
 
-/** Plain clock time as a logger writes it; counted in UTC so that the machine's own zone plays no part. */
-function timeOf(scan: number): string {
-  const time = new Date(Date.UTC(2026, 2, 2, 6, 0, 0) + (scan - 1) * SECONDS_PER_SCAN * 1000);
-  return time.toISOString().slice(0, 19).replace("T", " ");
-}
+const timeOf = (scan: number): string =>
+  logTime(Date.UTC(2026, 2, 2, 6, 0, 0), (scan - 1) * SECONDS_PER_SCAN);

@@ -82,7 +82,7 @@ export class ImportDialog {
         {},
         `${counted(rows, "row")} of readings on the sheet “${name}”. Blank fields are empty cells.`,
       ),
-      formulaNote(this.#workbook, this.#catalogue, name, log, sheet.headerRows + 1, () =>
+      formulaNote(this.#workbook, this.#catalogue, name, log, (sheet.readings?.row ?? 0) + 1, () =>
         this.#dialog.close(),
       ),
       buttons(this.#closing("Go to the sheet")),

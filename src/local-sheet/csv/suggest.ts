@@ -1,4 +1,4 @@
-import { columnName } from "../address";
+import { blankSafe, columnName } from "../../sheets";
 import type { Log } from "./read-log";
 
 export interface Suggestion {
@@ -26,7 +26,6 @@ export function suggest(log: Log, firstRow: number, rows = log.rows.length): Sug
   if (first < 0 || reference < 0 || rows === 0) return undefined;
   const range = (from: number, to: number) =>
     `${columnName(from)}${firstRow}:${columnName(to)}${firstRow + rows - 1}`;
-  const blankSafe = (area: string) => `IF(ISBLANK(${area}),"",${area})`;
   const [emf, terminals] = [blankSafe(range(first, last)), blankSafe(range(reference, reference))];
   return {
     cell: `${columnName(log.kinds.length + 1)}${firstRow}`,

@@ -72,8 +72,17 @@ describe("a log", () => {
   it("becomes a sheet with its number formats and a blank-safe formula beside it", () => {
     const log = readLog(text, format);
     const sheet = toSheet("run.csv", log);
-    expect(sheet).toMatchObject({ name: "run", headerRows: 2, noteRows: 1 });
-    expect(sheet.columns[1]?.numberFormat).toBe("0.000");
+    expect(sheet).toMatchObject({
+      name: "run",
+      frozenRows: 2,
+      readings: { row: 2, column: 0, rows: log.rows },
+    });
+    expect(sheet.columns[1]?.format).toBe("3 decimals");
+    expect(sheet.cells.map(({ value, role }) => [value, role]).slice(0, 3)).toEqual([
+      ["invented", "note"],
+      ["Zeit", "header"],
+      ["CH1 mV", "header"],
+    ]);
     const suggestion = suggest(log, 3);
     expect(suggestion?.cell).toBe("G3");
     expect(suggestion?.formula("N")).toBe(
