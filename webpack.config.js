@@ -6,8 +6,8 @@
  *            `sideEffects: false`: the associations are side effects and would be dropped silently.
  * pages      the task pane and the local sheet. Only the local sheet carries the grid engine.
  */
-import { existsSync } from "node:fs";
-import { dirname, resolve } from "node:path";
+import { existsSync, mkdirSync, writeFileSync } from "node:fs";
+import { dirname, relative, resolve } from "node:path";
 import { fileURLToPath } from "node:url";
 import CopyPlugin from "copy-webpack-plugin";
 import HtmlPlugin from "html-webpack-plugin";
@@ -50,6 +50,28 @@ const page = (name, template, policy) =>
 const folder = (from, to) =>
   existsSync(at(from)) ? [{ from: at(from), to: at("dist", to), noErrorOnMissing: true }] : [];
 
+/**
+ * Writes down which files of which packages went into a bundle, into .cache/bundled/: `src/build/licences` reads what
+ * ships from there, and nothing that only helped to build it.
+ */
+class BundledPackages {
+  apply(compiler) {
+    compiler.hooks.afterEmit.tap("BundledPackages", ({ modules }) => {
+      const files = new Set();
+      // Modules that were merged into one stand inside it.
+      const collect = (module) => {
+        for (const inner of module.modules ?? []) collect(inner);
+        const file = module.nameForCondition?.();
+        if (file?.includes("node_modules")) files.add(relative(root, file).replaceAll("\\", "/"));
+      };
+      for (const module of modules) collect(module);
+      mkdirSync(at(".cache/bundled"), { recursive: true });
+      const list = JSON.stringify([...files].sort(), null, 2);
+      writeFileSync(at(".cache/bundled", `${compiler.options.name}.json`), `${list}\n`);
+    });
+  }
+}
+
 const shared = {
   context: root,
   mode: "production",
@@ -83,14 +105,23 @@ const functions = {
   ...shared,
   name: "functions",
   entry: { functions: at("src/functions/associate.ts") },
+  plugins: [new BundledPackages()],
   module: { rules: [typescript("src/functions")] },
   output: { path: at("dist"), filename: "[name].js", clean: true },
   optimization: { ...shared.optimization, splitChunks: false, runtimeChunk: false },
 };
 
+/** The pane's picture by its name; the grid engine's own chunks by their number. */
+const chunkName =
+  (ending) =>
+  ({ chunk }) =>
+    `${chunk?.name ? "[name]" : "sheet.[id]"}.${ending}`;
+
 const pages = {
   ...shared,
   name: "pages",
+  // A chunk is what an import() brings, its packages with it: the pane's picture is one file.
+  optimization: { ...shared.optimization, splitChunks: { cacheGroups: { defaultVendors: false } } },
   entry: { taskpane: at("src/taskpane/index.ts"), sheet: at("src/local-sheet/index.ts") },
   module: {
     rules: [
@@ -102,21 +133,23 @@ const pages = {
   output: {
     path: at("dist"),
     filename: "[name].js",
-    chunkFilename: "sheet.[id].js",
+    chunkFilename: chunkName("js"),
     assetModuleFilename: "assets/[name][ext]",
   },
   plugins: [
+    new BundledPackages(),
     // The grid engine's hyphenation patterns of sixty languages; it asks for English alone.
     new webpack.IgnorePlugin({
       resourceRegExp: /^\.\/(?!en-)[a-z0-9-]+-[\w-]{8}\.js$/,
       contextRegExp: /engine-render/,
     }),
-    new MiniCssExtractPlugin({ filename: "[name].css", chunkFilename: "sheet.[id].css" }),
+    new MiniCssExtractPlugin({ filename: "[name].css", chunkFilename: chunkName("css") }),
     page("taskpane", "src/taskpane/taskpane.html", contentSecurityPolicy({ scripts: [OFFICE] })),
     page("sheet", "src/local-sheet/sheet.html", contentSecurityPolicy({ hashes: styleHashes })),
     new CopyPlugin({
       patterns: [
         { from: at("src/catalogue/functions.json"), to: at("dist/functions.json") },
+        { from: at("src/taskpane/shortcuts.json"), to: at("dist/shortcuts.json") },
         { from: at("manifest.xml"), to: at("dist/manifest.xml"), noErrorOnMissing: true },
         ...folder("src/assets", "assets"),
         ...folder("samples", "samples"),

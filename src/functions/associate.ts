@@ -1,6 +1,8 @@
 /**
  * Entry of functions.js: tells the custom-functions runtime which function answers to
- * which id. Opened in an ordinary browser the task pane has no such runtime to tell.
+ * which id, and publishes the same functions to the page. In Excel's shared runtime the
+ * pane is that page, so it can show live results; in an ordinary browser there is no
+ * runtime to tell.
  */
 import * as worksheetFunctions from ".";
 
@@ -9,3 +11,5 @@ if (typeof CustomFunctions !== "undefined") {
     CustomFunctions.associate(id, worksheetFunction);
   }
 }
+
+Object.defineProperty(globalThis, "BeadlineFunctions", { value: Object.freeze({ ...worksheetFunctions }) });

@@ -1,4 +1,5 @@
 import { BooleanNumber, type Injector } from "@univerjs/core";
+import { BaseReferenceObject } from "@univerjs/engine-formula";
 import {
   CELL_INVERTED_INDEX_CACHE,
   FunctionType,
@@ -7,6 +8,7 @@ import {
 } from "@univerjs/preset-sheets-core";
 import { functionsRuntime, type WorksheetFunction } from "../catalogue/functions-runtime";
 import { readNumbersInArrayConstants } from "./array-constants";
+import { keepBlankResults } from "./blank-results";
 import { EngineFunction } from "./engine-function";
 import { ErrorMessages } from "./error-messages";
 import { type FunctionMetadata, readMetadata } from "./function-metadata";
@@ -47,6 +49,7 @@ export function registerFunctions(
 ): ErrorMessages {
   readNumbersInArrayConstants();
   switchOffInvertedIndex(CELL_INVERTED_INDEX_CACHE);
+  keepBlankResults(BaseReferenceObject.prototype);
   const messages = new ErrorMessages();
   const functions = metadata.map((each) => {
     const implementation = associated.get(each.id);

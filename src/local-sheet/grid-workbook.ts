@@ -7,13 +7,13 @@ import {
   SetWorksheetActiveOperation,
 } from "@univerjs/preset-sheets-core";
 import { parseAddress, parseCell } from "./address";
-import { headStyles } from "./cell-styles";
+import { cellStyle } from "./cell-styles";
 import { engineErrorMessage } from "./engine-errors";
 import type { ErrorMessages } from "./error-messages";
 import type { Grid } from "./grid";
 import { toSheetData } from "./sheet-data";
 import { SpilledResults } from "./spilled-results";
-import type { CellValue, NewSheet, Workbook } from "./workbook";
+import type { CellValue, FilledSheet, Workbook } from "./workbook";
 
 /** Columns before a selected one that stay in view: a result next to the readings it came from. */
 const columnsLeftInView = 4;
@@ -76,7 +76,7 @@ export class GridWorkbook implements Workbook {
     const corner = this.#range(cell);
     this.#sheetOf(corner)
       .getRange(corner.getRow(), corner.getColumn(), 1, titles.length)
-      .setValues([titles.map((title) => ({ v: title, t: CellValueType.STRING, s: headStyles.header }))]);
+      .setValues([titles.map((title) => ({ v: title, t: CellValueType.STRING, s: cellStyle("header") }))]);
   }
 
   async select(range: string): Promise<void> {
@@ -87,7 +87,7 @@ export class GridWorkbook implements Workbook {
     sheet.scrollToCell(found.getRow(), Math.max(0, found.getColumn() - columnsLeftInView));
   }
 
-  async addSheet(sheet: NewSheet): Promise<string> {
+  async addSheet(sheet: FilledSheet): Promise<string> {
     const workbook = this.#workbook();
     // A cell still being typed in would keep the keyboard on the sheet left behind. What stands in it is dropped: half
     // a formula cannot be taken over.

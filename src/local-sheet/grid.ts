@@ -38,3 +38,12 @@ export function createGrid(container: HTMLElement, workbook: IWorkbookData): Gri
   followSystemTheme((dark) => api.toggleDarkMode(dark));
   return { univer, api };
 }
+
+/** Puts another workbook in place of the open one, of which nothing is kept. */
+export function openWorkbook({ univer, api }: Grid, workbook: IWorkbookData): void {
+  const old = api.getActiveWorkbook()?.getId();
+  // In this order, so that there is an open workbook at every moment.
+  univer.createUnit(UniverInstanceType.UNIVER_SHEET, workbook);
+  if (old !== undefined) api.disposeUnit(old);
+  api.getFormula().executeCalculation();
+}

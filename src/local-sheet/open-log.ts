@@ -1,6 +1,7 @@
 import type { Catalogue } from "../catalogue/catalogue";
 import { decode, isBinary } from "./csv/decode";
 import { ImportDialog } from "./csv/import-dialog";
+import { looksLikeWorkbook } from "./files";
 import type { Workbook } from "./workbook";
 
 /** A browser keeps a file and its table in memory together; beyond this it ends the page instead of answering. */
@@ -9,8 +10,13 @@ const maxBytes = 200_000_000;
 /** From here on reading takes long enough to say so. */
 const slowBytes = 2_000_000;
 
-/** Opens logs by the button and by drop anywhere on the page; both lead to the same dialog. */
-export function openLogs(workbook: Workbook, catalogue: Catalogue, sampleName: HTMLElement): void {
+/** Opens logs and workbooks by the button and by drop anywhere on the page; logs lead to the same dialog. */
+export function openLogs(
+  workbook: Workbook,
+  catalogue: Catalogue,
+  sampleName: HTMLElement,
+  openWorkbook: (file: File) => Promise<void>,
+): void {
   const input = document.getElementById("log-file") as HTMLInputElement;
   const dialog = new ImportDialog(
     document.getElementById("import") as HTMLDialogElement,
@@ -22,6 +28,7 @@ export function openLogs(workbook: Workbook, catalogue: Catalogue, sampleName: H
   );
   const open = async (file: File | undefined) => {
     if (!file) return;
+    if (await looksLikeWorkbook(file)) return openWorkbook(file);
     if (file.size > slowBytes) await dialog.wait(`Reading ${file.name}…`);
     const decoded = file.size > maxBytes ? undefined : decode(new Uint8Array(await file.arrayBuffer()));
     const refusal = decoded ? refusalOf(decoded) : "it is larger than 200 MB. Split the log into parts.";

@@ -1,3 +1,5 @@
+import type { CellValue, FilledSheet } from "../sheets";
+
 /**
  * A workbook as our pages see it. The pane works on this alone, so the same pane serves Excel and the local sheet;
  * everything is asynchronous because Excel is. Addresses are in A1 style, with a sheet name in front
@@ -18,34 +20,12 @@ export interface Workbook {
   /** Selects a range, opens its sheet and brings it into view. */
   select(range: string): Promise<void>;
   /** Adds a sheet behind the others and opens it. A name in use gets a number; gives back the name it has. */
-  addSheet(sheet: NewSheet): Promise<string>;
+  addSheet(sheet: FilledSheet): Promise<string>;
   /** What stands behind the error that a cell shows; undefined where there is no error. */
   getErrorMessage(cell: string): Promise<string | undefined>;
 }
 
-export type CellValue = string | number | boolean;
-
-export interface NewSheet {
-  name: string;
-  /** Row by row from A1. null leaves a cell truly empty; a text that starts with "=" stays text. */
-  rows: (CellValue | null)[][];
-  /** Formulas by cell. */
-  formulas?: Record<string, string>;
-  columns: SheetColumn[];
-  /** The rows above the readings, counted from 0: they stay in view, the last of them is the bold header. */
-  headerRows: number;
-  /** Rows of remarks at the top, in muted text. */
-  noteRows?: number;
-  /** The first of them is the title. */
-  hasTitle?: boolean;
-}
-
-export interface SheetColumn {
-  width: number;
-  numberFormat?: string;
-  /** Inputs stand in slate, results in ink. */
-  role?: "input" | "result";
-}
+export type { CellValue, FilledSheet };
 
 declare global {
   interface Window {

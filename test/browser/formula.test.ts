@@ -19,7 +19,13 @@ beforeAll(async () => {
 });
 beforeEach(async () => {
   bench = await sheet.page.evaluate(() =>
-    window.beadlineSheet!.addSheet({ name: "Bench", rows: [], columns: [], headerRows: 0 }),
+    window.beadlineSheet!.addSheet({
+      name: "Bench",
+      columns: [],
+      frozenRows: 0,
+      printOnePageWide: true,
+      cells: [],
+    }),
   );
 });
 afterAll(() => closePage(sheet));

@@ -16,12 +16,14 @@ it("converts 100 000 readings, all different, with one formula", async () => {
       (50 * index) / count,
       20 + (index % 50) / 10,
     ]);
-    const column = { width: 88, numberFormat: "0.000" };
+    const column = { width: 88, format: "mV" } as const;
     await window.beadlineSheet!.addSheet({
       name: "Long",
-      rows: readings,
       columns: [column, column],
-      headerRows: 0,
+      frozenRows: 0,
+      printOnePageWide: true,
+      cells: [],
+      readings: { row: 0, column: 0, rows: readings },
     });
     await window.beadlineSheet!.setFormula(
       "C1",

@@ -76,7 +76,7 @@ describe("opening a log", () => {
 
   it.each([
     ["an empty file", "", "it is empty"],
-    ["a workbook", "PK\u0003\u0004\0\0", "not a text file"],
+    ["a picture", "GIF89a\0\0", "not a text file"],
   ])("refuses %s with a reason", async (_, text, reason) => {
     await open(text);
     const dialog = sheet.page.locator("#import");

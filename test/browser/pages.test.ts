@@ -47,21 +47,23 @@ describe("the pages", () => {
   ] as const)("list every function by keyboard %s", async (_, path, options) => {
     const watched = await openPage(path, { viewport: { width: 700, height: 800 }, ...options });
     const { page } = watched;
-    await page.locator("details").first().waitFor();
+    const entries = page.getByRole("option");
+    await entries.first().waitFor();
     const functions = await page.evaluate(
       async () => (await (await fetch("functions.json")).json()).functions,
     );
-    expect(await page.locator("details").count()).toBe(functions.length);
-    await page.locator("summary").first().focus();
+    expect(await entries.count()).toBe(functions.length);
+    await page.getByRole("combobox", { name: "What do you want to do?" }).focus();
+    await page.keyboard.press("ArrowDown");
     await page.keyboard.press("Enter");
-    expect(await page.locator("details").first().locator("dl.arguments").isVisible()).toBe(true);
+    expect(await page.locator("dl.arguments").isVisible()).toBe(true);
     if (path === "sheet.html") await page.waitForFunction(() => window.beadlineSheet !== undefined);
     await closePage(watched);
   });
 
-  it("hide and show the list of functions on the local sheet", async () => {
+  it("hide and show the pane on the local sheet", async () => {
     const sheet = await openSheet();
-    const button = sheet.page.getByRole("button", { name: /functions$/ });
+    const button = sheet.page.getByRole("button", { name: /pane$/ });
     await button.click();
     expect(await sheet.page.locator("#functions").isVisible()).toBe(false);
     expect(await button.getAttribute("aria-expanded")).toBe("false");

@@ -18,7 +18,7 @@ const words = (text: string) => text.split(" ").filter((word) => word !== "");
 const SEQUENCES: Record<string, Sequence> = {
   OfficeApp: sequence(
     "Id AlternateId Version ProviderName DefaultLocale DisplayName Description IconUrl HighResolutionIconUrl " +
-      "SupportUrl AppDomains Hosts Requirements DefaultSettings Permissions Dictionary VersionOverrides",
+      "SupportUrl AppDomains Hosts Requirements DefaultSettings Permissions Dictionary VersionOverrides ExtendedOverrides",
     "Id Version ProviderName DefaultLocale DisplayName Description IconUrl HighResolutionIconUrl SupportUrl " +
       "Hosts Requirements DefaultSettings Permissions VersionOverrides",
   ),
@@ -41,11 +41,14 @@ const SEQUENCES: Record<string, Sequence> = {
     "Script Page Metadata Namespace",
   ),
   "ExtensionPoint PrimaryCommandSurface": sequence("OfficeTab CustomTab"),
+  "ExtensionPoint ContextMenu": sequence("OfficeMenu", "OfficeMenu"),
+  OfficeMenu: sequence("Control", "Control"),
   OfficeTab: sequence("Group", "Group"),
   Group: sequence("Label Icon Control", "Label Icon Control"),
   "Control Button": sequence("Label Supertip Icon Action", "Label Supertip Icon Action"),
   Supertip: sequence("Title Description", "Title Description"),
   "Action ShowTaskpane": sequence("TaskpaneId SourceLocation Title", "SourceLocation"),
+  "Action ExecuteFunction": sequence("FunctionName", "FunctionName"),
   Resources: sequence("Images Urls ShortStrings LongStrings", "Images Urls ShortStrings LongStrings"),
 };
 

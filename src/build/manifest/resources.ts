@@ -60,13 +60,14 @@ export function checkLengths(root: Element): string[] {
 export function checkAddresses(root: Element): string[] {
   const addresses = everything(root).filter(
     ({ name, attributes }) =>
-      attributes.DefaultValue !== undefined &&
-      /^(IconUrl|HighResolutionIconUrl|SupportUrl|SourceLocation|Image|Url)$/.test(name),
+      name === "ExtendedOverrides" ||
+      (attributes.DefaultValue !== undefined &&
+        /^(IconUrl|HighResolutionIconUrl|SupportUrl|SourceLocation|Image|Url)$/.test(name)),
   );
   const faults: string[] = [];
   const origins = new Set<string>();
   for (const { attributes, line } of addresses) {
-    const address = attributes.DefaultValue ?? "";
+    const address = attributes.DefaultValue ?? attributes.Url ?? "";
     if (!URL.canParse(address)) faults.push(`line ${line}: "${address}" is not a whole address`);
     else if (!address.startsWith("https://"))
       faults.push(`line ${line}: "${address}" must begin with https://`);

@@ -16,10 +16,9 @@ export function checkRuntime(root: Element): string[] {
   const sharers: [string, Element | undefined][] = [
     ["Page", host && at(host, "AllFormFactors", "ExtensionPoint", "Page", "SourceLocation")],
     ["FunctionFile", host && at(host, "DesktopFormFactor", "FunctionFile")],
-    ...allNamed(root, "Action").map((action): [string, Element | undefined] => [
-      "ShowTaskpane",
-      at(action, "SourceLocation"),
-    ]),
+    ...allNamed(root, "Action")
+      .filter(({ attributes }) => attributes["xsi:type"] === "ShowTaskpane")
+      .map((action): [string, Element | undefined] => ["ShowTaskpane", at(action, "SourceLocation")]),
   ];
   for (const [name, element] of sharers) {
     const resid = element?.attributes.resid;

@@ -50,6 +50,30 @@ test.each<[string, string | RegExp, string, string]>([
     "<Sparkle/><DefaultSettings>",
     "<Sparkle> is not known in <OfficeApp>",
   ],
+  [
+    "shortcuts before the functions",
+    /(<VersionOverrides[\s\S]*<\/VersionOverrides>)(\s*)(<ExtendedOverrides .*\/>)/,
+    "$3$2$1",
+    "<VersionOverrides> must stand before <ExtendedOverrides>",
+  ],
+  [
+    "a context menu without its button",
+    /<OfficeMenu id[\s\S]*?<\/OfficeMenu>/,
+    "<OfficeMenu/>",
+    "<OfficeMenu> needs <Control>",
+  ],
+  [
+    "a menu entry that calls nothing",
+    /<FunctionName>.*<\/FunctionName>/,
+    "",
+    "<Action> needs <FunctionName>",
+  ],
+  [
+    "shortcuts at another place",
+    "https://localhost:3000/shortcuts.json",
+    "https://localhost:4000/shortcuts.json",
+    "several origins",
+  ],
   ["a missing element", /<ProviderName>.*<\/ProviderName>/, "", "<OfficeApp> needs <ProviderName>"],
 
   ["an Id that is no GUID", /<Id>.*<\/Id>/, "<Id>beadline</Id>", "is not a GUID"],
