@@ -7,8 +7,9 @@ import { catalogue } from "./catalogue";
 import { helpPage } from "./help";
 import { metadata } from "./metadata";
 import { withFunctionTable } from "./readme";
-import { furnaceLog } from "./samples/furnace-log";
+import { sampleFiles } from "./samples";
 import { documentedFunctions, root } from "./sources";
+import { writeSampleWorkbooks } from "./workbooks/write";
 
 /** Writes only what differs, so that file watchers stay quiet. */
 function write(path: string, content: string): void {
@@ -27,5 +28,6 @@ const made = catalogue(documented);
 write("src/catalogue/catalogue.json", json(made));
 write("src/catalogue/functions.json", json(await metadata(documented)));
 write("src/help/help.html", helpPage(made));
-write("samples/furnace-log.csv", furnaceLog());
+for (const [file, text] of Object.entries(sampleFiles())) write(`samples/${file}`, text);
+writeSampleWorkbooks();
 write("README.md", withFunctionTable(readFileSync(resolve(root, "README.md"), "utf8"), made));

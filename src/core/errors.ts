@@ -18,7 +18,14 @@ export interface Quantity {
 }
 
 /** Six significant digits: enough to see by how much a limit was passed, short enough to read. */
-const shortly = (value: number): string => String(Number(value.toPrecision(6)));
+const shortly = (value: number): string =>
+  Number.isFinite(value) ? String(Number(value.toPrecision(6))) : beyond(value);
+
+/** What only numbers that no instrument gives can come to. */
+function beyond(value: number): string {
+  if (Number.isNaN(value)) return "(not a number)";
+  return value > 0 ? "over 1.8E+308" : "under -1.8E+308";
+}
 
 /** Rows are counted in whole numbers, and named to the last digit. */
 const counted = (value: number): string => (Number.isInteger(value) ? String(value) : shortly(value));
@@ -40,7 +47,7 @@ export const measured = (value: number, unit: string): Quantity => ({
 
 /** An EMF in mV, to the tenth of a microvolt. */
 export const millivolts = (value: number): Quantity => ({
-  print: () => `${String(Number(value.toFixed(4)))} mV`,
+  print: () => `${Number.isFinite(value) ? String(Number(value.toFixed(4))) : beyond(value)} mV`,
 });
 
 type Part = string | Quantity;

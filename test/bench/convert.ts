@@ -2,25 +2,12 @@
  * What a conversion costs, as ratios to one evaluation of the reference function measured in the same run:
  * the exact inverse, and one formula over a million readings on the built functions.
  */
-import { resolve } from "node:path";
 import { type Thermocouple, thermocouple } from "../../src/core";
-import "../custom-functions-runtime";
+import { builtFunctions, type WorksheetFunction } from "./built-functions";
 import { bestTimes, type Work } from "./ratio";
 
 const READINGS = 1_000_000;
 const ROUNDS = 25;
-
-type WorksheetFunction = (...given: (unknown[][] | undefined)[]) => unknown[][];
-
-/** Imported as a browser would run it: a sandboxed context would slow its look-up of globals. */
-async function builtFunctions(): Promise<Map<string, WorksheetFunction>> {
-  const built = new Map<string, WorksheetFunction>();
-  Object.assign(CustomFunctions, {
-    associate: (id: string, worksheetFunction: WorksheetFunction) => built.set(id, worksheetFunction),
-  });
-  await import(resolve("dist/functions.js"));
-  return built;
-}
 
 /** Spread evenly over 20 to 1350 °C in no order (multiples of the golden ratio). */
 function readings(couple: Thermocouple) {

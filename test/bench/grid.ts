@@ -11,18 +11,20 @@ import type { Line } from "./convert";
 const ROWS = 10_000;
 
 /** Milliseconds from handing the formulas to the sheet until its last cell holds a number. */
-const timeSheet = (
-  page: Page,
-  name: string,
-  rows: number[][],
-  formulas: Record<string, string>,
-): Promise<number> =>
+const timeSheet = (page: Page, name: string, rows: number[][], formulas: string[]): Promise<number> =>
   page.evaluate(
     async ([name, rows, formulas]) => {
-      const column = { width: 88, numberFormat: "0.000" };
+      const column = { width: 88, format: "mV" } as const;
       const sheet = window.beadlineSheet as NonNullable<typeof window.beadlineSheet>;
       const start = performance.now();
-      await sheet.addSheet({ name, rows, formulas, columns: [column, column], headerRows: 0 });
+      await sheet.addSheet({
+        name,
+        columns: [column, column],
+        frozenRows: 0,
+        printOnePageWide: true,
+        cells: formulas.map((formula, row) => ({ row, column: 1, formula, role: "result" })),
+        readings: { row: 0, column: 0, rows },
+      });
       const last = `${name}!B${rows.length}`;
       while (typeof (await sheet.getValues(last))[0]?.[0] !== "number")
         await new Promise((next) => setTimeout(next, 5));
@@ -44,10 +46,8 @@ export async function gridLines(): Promise<Line[]> {
   )?.coefficients;
   if (coefficients === undefined) throw new Error("no published inverse of type K from 0 °C");
   const readings = Array.from({ length: ROWS }, (_, i) => [(20 * (i + 1)) / ROWS]);
-  const native = Object.fromEntries(
-    readings.map((_, i) => [`B${i + 1}`, polynomial(coefficients, `A${i + 1}`)]),
-  );
-  const one = { B1: `=BEAD.TEMPERATURE(IF(ISBLANK(A1:A${ROWS}),"",A1:A${ROWS}),"K",0)` };
+  const native = readings.map((_, i) => polynomial(coefficients, `A${i + 1}`));
+  const one = [`=BEAD.TEMPERATURE(IF(ISBLANK(A1:A${ROWS}),"",A1:A${ROWS}),"K",0)`];
   const [server, browserServer] = await Promise.all([serve("dist", { port: 5800 }), launchBrowser()]);
   const browser = await chromium.connect(browserServer.wsEndpoint());
   try {

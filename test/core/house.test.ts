@@ -9,9 +9,11 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
   functions: ["core"],
   catalogue: [],
   styles: [],
-  taskpane: ["catalogue", "styles"],
-  "local-sheet": ["catalogue", "styles", "taskpane"],
-  build: ["core", "functions", "catalogue"],
+  sheets: ["catalogue"],
+  workbooks: ["sheets"],
+  taskpane: ["catalogue", "sheets", "styles"],
+  "local-sheet": ["catalogue", "sheets", "styles", "taskpane", "workbooks"],
+  build: ["core", "functions", "catalogue", "sheets", "workbooks"],
 };
 
 const src = resolve("src");

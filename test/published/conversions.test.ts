@@ -4,28 +4,22 @@
  */
 import { describe, expect, it } from "vitest";
 import { EMF, TEMPERATURE } from "../../src/functions";
+import { fixedPoints, makersPage, textbook, textbookEmfs, textbookTemperatures } from "./conversions";
 
 const one = (value: unknown): unknown[][] => [[value]];
 const first = (cells: unknown[][]): number => cells[0]?.[0] as number;
 
-describe("T. R. Kuphaldt, Lessons In Industrial Instrumentation, thermocouple exercises (open textbook)", () => {
-  it.each([
-    [2.55, 84, 195],
-    [18.83, 84, 904],
-  ])("type K: %d mV with the terminals at %d °F is %d °F", (emf, reference, printed) => {
-    expect(Math.abs(first(TEMPERATURE(one(emf), one("K"), one(reference), one("F"))) - printed)).toBeLessThan(
-      0.5,
-    );
-  });
+describe(textbook, () => {
+  it.each(textbookTemperatures)(
+    "type K: %d mV with the terminals at %d °F is %d °F",
+    (emf, reference, printed) => {
+      expect(
+        Math.abs(first(TEMPERATURE(one(emf), one("K"), one(reference), one("F"))) - printed),
+      ).toBeLessThan(0.5);
+    },
+  );
 
-  it.each([
-    ["B", 589, 70, "F", 0.463, 0.0006],
-    // The book subtracts two rounded table values here: 1 µV.
-    ["B", 821, 73, "F", 0.953, 0.0011],
-    ["B", 1524, 105, "F", 3.378, 0.0006],
-    ["B", 1922, 135, "F", 5.294, 0.0006],
-    ["E", 233, 25, "C", 14.395, 0.0006],
-  ])(
+  it.each(textbookEmfs)(
     "type %s: %d with the terminals at %d (°%s) gives %d mV",
     (type, t, reference, unit, printed, tolerance) => {
       expect(Math.abs(first(EMF(one(t), one(type), one(reference), one(unit))) - printed)).toBeLessThan(
@@ -36,13 +30,7 @@ describe("T. R. Kuphaldt, Lessons In Industrial Instrumentation, thermocouple ex
 });
 
 describe("a sensor maker's technical page, EMF at 350 °C", () => {
-  it.each([
-    ["J", 19.09],
-    ["N", 11.136],
-    ["R", 2.896],
-    ["S", 2.786],
-    ["T", 17.819],
-  ])("type %s: %d mV", (type, printed) => {
+  it.each(makersPage)("type %s: %d mV", (type, printed) => {
     expect(Math.abs(first(EMF(one(350), one(type))) - printed)).toBeLessThanOrEqual(0.0005 + 1e-9);
   });
 });
@@ -57,12 +45,7 @@ describe("a textbook answer that is wrong", () => {
 });
 
 describe("published EMF of type S at fixed points of ITS-90 (IEC 60584-1:2013 and calibration guides, from memory)", () => {
-  it.each([
-    ["zinc", 419.527, 3.4469],
-    ["aluminium", 660.323, 5.8601],
-    ["silver", 961.78, 9.1484],
-    ["copper", 1084.62, 10.5748],
-  ])("%s, %d °C: %d mV", (_, t, printed) => {
+  it.each(fixedPoints)("%s, %d °C: %d mV", (_, t, printed) => {
     expect(Math.abs(first(EMF(one(t), one("S"))) - printed)).toBeLessThanOrEqual(0.00005 + 1e-9);
   });
 });

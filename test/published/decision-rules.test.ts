@@ -7,6 +7,7 @@ import {
   largestPassRisk,
   verdict,
 } from "../../src/core/conformity";
+import { jcgmTable1, recomputedRisks } from "./decision-rules";
 
 const rule = (name: string): DecisionRule => decisionRule(name) as DecisionRule;
 
@@ -24,19 +25,7 @@ describe("ILAC-G8:09/2019", () => {
     expect(risk * 100).toBeLessThanOrEqual(percent + 1e-9);
   });
 
-  /** 1 − Φ(r·k), one-sided, recomputed with 40 digits by an independent library (mpmath). */
-  it.each([
-    ["simple", 2, 0.5],
-    ["guarded 0.83", 2, 0.048457226266722886],
-    ["guarded", 2, 0.02275013194817921],
-    ["guarded 1.5", 2, 0.0013498980316301035],
-    ["guarded 2", 2, 3.167124183311998e-5],
-    ["guarded 3", 2, 9.865876450376981e-10],
-    ["guarded 0.83", 1.96, 0.05188979082465306],
-    ["guarded", 1.96, 0.024997895148220373],
-    ["guarded 1.5", 1.96, 0.0016410612341570818],
-    ["guarded 3", 1.96, 2.051332410772596e-9],
-  ])('"%s" with k = %d risks %d at the acceptance limit', (name, k, risk) => {
+  it.each(recomputedRisks)('"%s" with k = %d risks %d at the acceptance limit', (name, k, risk) => {
     const found = largestPassRisk(1000, 1, rule(name), k, "none") as number;
     expect(Math.abs(found / risk - 1)).toBeLessThan(1e-10);
   });
@@ -87,13 +76,7 @@ describe("JCGM 106:2012 (from memory, recomputed)", () => {
     expect(Math.abs(p / 0.6626297864953077 - 1)).toBeLessThan(1e-10);
   });
 
-  it.each([
-    [0.84, 0.8],
-    [1.28, 0.9],
-    [1.64, 0.95],
-    [2.33, 0.99],
-    [3.09, 0.999],
-  ])("table 1: %d standard uncertainties inside a single limit is %d", (z, p) => {
+  it.each(jcgmTable1)("table 1: %d standard uncertainties inside a single limit is %d", (z, p) => {
     expect(Math.abs((conformityProbability(-z, 0, 1, "none") as number) - p)).toBeLessThan(0.0014);
   });
 });

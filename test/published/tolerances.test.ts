@@ -6,7 +6,15 @@ import {
   tolerance,
   toleranceClassesOf,
 } from "../../src/core/conformity";
-import { type PrintedRow, printedAstm, printedIec, printedPlatinum } from "./tolerances";
+import {
+  type PrintedRow,
+  printedAstm,
+  printedAstmCables,
+  printedAstmMicrovolts,
+  printedIec,
+  printedIecCables,
+  printedPlatinum,
+} from "./tolerances";
 
 const printed = ({ constant, proportion }: PrintedRow, t: number): number =>
   constant ?? (proportion as number) * Math.abs(t);
@@ -102,22 +110,8 @@ describe("IEC 60751:2008, wire-wound sensors", () => {
   });
 });
 
-/** [cable, class, µV, ± °C, measuring junction °C] */
-// biome-ignore format: one row a line
-const IEC_CABLES: readonly (readonly [string, string, number, number, number])[] = [
-  ["JX", "1", 85, 1.5, 500], ["JX", "2", 140, 2.5, 500],
-  ["TX", "1", 30, 0.5, 300], ["TX", "2", 60, 1, 300],
-  ["EX", "1", 120, 1.5, 500], ["EX", "2", 200, 2.5, 500],
-  ["KX", "1", 60, 1.5, 900], ["KX", "2", 100, 2.5, 900],
-  ["NX", "1", 60, 1.5, 900], ["NX", "2", 100, 2.5, 900],
-  ["KCA", "2", 100, 2.5, 900], ["KCB", "2", 100, 2.5, 900], ["NC", "2", 100, 2.5, 900],
-  ["RCA", "2", 30, 2.5, 1000], ["RCB", "2", 60, 5, 1000],
-  ["SCA", "2", 30, 2.5, 1000], ["SCB", "2", 60, 5, 1000],
-  ["BC", "2", 40, 3.5, 1400],
-];
-
 describe("IEC 60584-3, extension and compensating cables (an instrument maker's manual, two further pages)", () => {
-  it.each(IEC_CABLES)("%s class %s: %d µV, ±%d °C at %d °C", (cable, name, uv, printedDegrees, at) => {
+  it.each(printedIecCables)("%s class %s: %d µV, ±%d °C at %d °C", (cable, name, uv, printedDegrees, at) => {
     expect(cableToleranceUv(cable, name)).toBe(uv);
     expect(cableToleranceDegrees(cable, name)).toBe(printedDegrees);
     // The printed degrees are the µV over the Seebeck coefficient, rounded; 2.27 is printed as 2.5 for type R.
@@ -127,23 +121,12 @@ describe("IEC 60584-3, extension and compensating cables (an instrument maker's 
 });
 
 describe("ASTM E230/E230M, extension wires (three makers' tables)", () => {
-  it.each([
-    ["KX", 2.2, 1.1],
-    ["JX", 2.2, 1.1],
-    ["EX", 1.7, 1],
-    ["TX", 1, 0.5],
-    ["NX", 2.2, 1.1],
-  ])("%s: standard ±%d °C, special ±%d °C", (cable, standard, special) => {
+  it.each(printedAstmCables)("%s: standard ±%d °C, special ±%d °C", (cable, standard, special) => {
     expect(cableToleranceDegrees(cable, "standard")).toBe(standard);
     expect(cableToleranceDegrees(cable, "special")).toBe(special);
   });
 
-  it.each([
-    ["SX", 5, 57],
-    ["RX", 5, 57],
-    ["BX", 3.7, 33],
-    ["CX", 6.8, 110],
-  ])("%s: ±%d °C; ±%d µV from memory", (cable, printedDegrees, uv) => {
+  it.each(printedAstmMicrovolts)("%s: ±%d °C; ±%d µV from memory", (cable, printedDegrees, uv) => {
     expect(cableToleranceDegrees(cable, "standard")).toBe(printedDegrees);
     expect(cableToleranceUv(cable, "standard")).toBe(uv);
   });

@@ -88,3 +88,31 @@ export const printedPlatinum: readonly (readonly [name: string, t: number, limit
   ["B", -100, 0.8], ["B", 0, 0.3], ["B", 100, 0.8], ["B", 200, 1.3], ["B", 300, 1.8], ["B", 400, 2.3],
   ["B", 500, 2.8], ["B", 600, 3.3],
 ];
+
+/** IEC 60584-3, extension and compensating cables (an instrument maker's manual, two further pages): [cable, class, µV, ± °C, measuring junction °C] */
+// biome-ignore format: one row a line
+export const printedIecCables: readonly (readonly [
+  cable: string, name: string, uv: number, degrees: number, at: number,
+])[] = [
+  ["JX", "1", 85, 1.5, 500], ["JX", "2", 140, 2.5, 500],
+  ["TX", "1", 30, 0.5, 300], ["TX", "2", 60, 1, 300],
+  ["EX", "1", 120, 1.5, 500], ["EX", "2", 200, 2.5, 500],
+  ["KX", "1", 60, 1.5, 900], ["KX", "2", 100, 2.5, 900],
+  ["NX", "1", 60, 1.5, 900], ["NX", "2", 100, 2.5, 900],
+  ["KCA", "2", 100, 2.5, 900], ["KCB", "2", 100, 2.5, 900], ["NC", "2", 100, 2.5, 900],
+  ["RCA", "2", 30, 2.5, 1000], ["RCB", "2", 60, 5, 1000],
+  ["SCA", "2", 30, 2.5, 1000], ["SCB", "2", 60, 5, 1000],
+  ["BC", "2", 40, 3.5, 1400],
+];
+
+/** ASTM E230/E230M, extension wires, ± °C (three makers' tables). */
+// biome-ignore format: one row a line
+export const printedAstmCables: readonly (readonly [cable: string, standard: number, special: number])[] = [
+  ["KX", 2.2, 1.1], ["JX", 2.2, 1.1], ["EX", 1.7, 1], ["TX", 1, 0.5], ["NX", 2.2, 1.1],
+];
+
+/** The same for cables specified in µV (from memory) with the degrees that makers print. */
+// biome-ignore format: one row a line
+export const printedAstmMicrovolts: readonly (readonly [cable: string, degrees: number, uv: number])[] = [
+  ["SX", 5, 57], ["RX", 5, 57], ["BX", 3.7, 33], ["CX", 6.8, 110],
+];

@@ -1,5 +1,5 @@
-import { wrongKind } from "../../core";
-import { type Kind, shown } from "./kind";
+import { Refusal, wrongKind } from "../../core";
+import { type Kind, readNumber, shown } from "./kind";
 
 /** TRUE or FALSE, or the words. A number is refused: an empty cell would be read as FALSE. */
 export const truth: Kind<boolean> = {
@@ -9,6 +9,7 @@ export const truth: Kind<boolean> = {
     if (typeof cell === "boolean") return cell;
     const word = String(cell).trim().toUpperCase();
     if (typeof cell === "string" && (word === "TRUE" || word === "FALSE")) return word === "TRUE";
-    return wrongKind`${label}: ${typeof cell === "number" ? String(cell) : `"${shown(word)}"`} is neither TRUE nor FALSE`;
+    const given = typeof cell === "number" ? readNumber(cell, label) : `"${shown(word)}"`;
+    return given instanceof Refusal ? given : wrongKind`${label}: ${given} is neither TRUE nor FALSE`;
   },
 };
