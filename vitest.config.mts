@@ -12,7 +12,7 @@ export default defineConfig({
           name: "unit",
           include: ["test/**/*.test.ts"],
           exclude: ["test/browser/**"],
-          setupFiles: ["test/custom-functions-runtime.ts"],
+          setupFiles: ["test/custom-functions-runtime.ts", "test/property-seed.ts"],
           testTimeout: 30_000,
           sequence: { groupOrder: 0 },
         },

@@ -64,12 +64,13 @@ describe("temperatureOf", () => {
     );
   });
 
-  it("rises with the EMF", () => {
+  it("rises with the EMF, to within the 1E-9 °C of the inverse", () => {
     fc.assert(
       fc.property(fc.constantFrom(...names), within(0, 1), within(0, 1), (name, a, b) => {
         const c = couple(name);
         const at = (share: number) => c.temperature(c.emfUniqueFrom + share * (c.emfHigh - c.emfUniqueFrom));
-        expect(at(Math.max(a, b))).toBeGreaterThanOrEqual(at(Math.min(a, b)));
+        // Two EMFs a few bits apart may come out in either order.
+        expect(at(Math.max(a, b))).toBeGreaterThanOrEqual(at(Math.min(a, b)) - 1e-9);
       }),
     );
   });
