@@ -14,7 +14,7 @@ export const DRAWN = {
 } as const;
 
 /** The names that the readings of a survey go by in the functions that take them. */
-export const SURVEY_ARGUMENTS = ["times", "readings", "setpoint", "tolerance"] as const;
+export const SURVEY_ARGUMENTS = ["times", "readings", "setpoint", "tolerance", "corrections"] as const;
 
 export type Given = readonly (readonly unknown[])[] | number | string | null;
 

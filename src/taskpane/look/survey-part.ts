@@ -18,6 +18,7 @@ const WORDS: Readonly<Record<Argument, string>> = {
   readings: "Readings, °C",
   setpoint: "Set point, °C",
   tolerance: "Tolerance ±, °C",
+  corrections: "Corrections, °C (a row, or empty)",
 };
 
 /** The survey block that is selected, or that the selected formula uses, as a picture over time. */
@@ -47,6 +48,7 @@ export class SurveyPart {
       readings: field("readings"),
       setpoint: field("setpoint"),
       tolerance: field("tolerance"),
+      corrections: field("corrections"),
     };
     const rows = SURVEY_ARGUMENTS.map((name) => {
       const pick = button("Use selection", () => void pane.attempt(() => this.#pick(name)));
@@ -116,12 +118,14 @@ export class SurveyPart {
       this.#number(workbook, "tolerance"),
     ]);
     const names = await this.#names(workbook);
+    const corrections = await this.#corrections(workbook, names.length);
     const { figure, sensors } = surveyFigure({
       times,
       readings,
       names,
       setpoint,
       tolerance,
+      ...(corrections === undefined ? {} : { corrections }),
       whole: this.#whole.checked,
     });
     await this.#card.show(figure, sensorTable(sensors));
@@ -148,6 +152,17 @@ export class SurveyPart {
     if (typeof value !== "number" || Number.isNaN(value))
       throw new Trouble(`${WORDS[name]}: a number is needed.`);
     return value;
+  }
+
+  /** One number for each sensor; undefined where the field is empty. */
+  async #corrections(workbook: Workbook, sensors: number): Promise<number[] | undefined> {
+    const address = this.#fields.corrections.value.trim();
+    if (address === "") return undefined;
+    const values = (await workbook.getValues(address)).flat();
+    if (values.length !== sensors || !values.every((value) => typeof value === "number")) {
+      throw new Trouble(`${WORDS.corrections}: a number for each of the ${sensors} sensors is needed.`);
+    }
+    return values;
   }
 
   /** The titles above the readings, or their columns. */

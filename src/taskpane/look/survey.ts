@@ -10,6 +10,8 @@ export interface SurveyBlock {
   readonly names: readonly string[];
   readonly setpoint: number;
   readonly tolerance: number;
+  /** Added to each sensor's readings, as the functions do; left out, nothing is. */
+  readonly corrections?: readonly number[];
   /** The whole log, or what is near the band. */
   readonly whole: boolean;
 }
@@ -35,12 +37,14 @@ const FIRST_DATE = 20_000;
 /** A survey over time: the sensors, the band, the soak, and the worst sensors marked. */
 export function surveyFigure({
   times,
-  readings,
+  readings: raw,
   names,
   setpoint,
   tolerance,
+  corrections,
   whole,
 }: SurveyBlock): SurveyFigure {
+  const readings = corrections === undefined ? raw : corrected(raw, corrections);
   const rows = times.flatMap(([time], index) =>
     typeof time === "number" && readings[index] ? [{ time, cells: readings[index] }] : [],
   );
@@ -97,6 +101,12 @@ export function surveyFigure({
   };
 }
 
+/** Sensors are named from what is judged: the corrected readings. */
+const corrected = (readings: SurveyBlock["readings"], corrections: readonly number[]): CellValue[][] =>
+  readings.map((cells) =>
+    cells.map((cell, sensor) => (typeof cell === "number" ? cell + (corrections[sensor] ?? 0) : cell)),
+  );
+
 const signed = (deviation: number) =>
   withUnit(`${deviation > 0 ? "+" : ""}${deviation.toFixed(1).replace("-", "−")}`, "°C");
 
@@ -106,7 +116,7 @@ function soakOf({
   readings,
   setpoint,
   tolerance,
-}: Omit<SurveyBlock, "names" | "whole">): { from: number; to: number } | undefined {
+}: Omit<SurveyBlock, "names" | "corrections" | "whole">): { from: number; to: number } | undefined {
   const unit = typeof times[0]?.[0] === "number" && times[0][0] < FIRST_DATE ? "min" : null;
   const metric = (name: string) =>
     single("SOAK", times, readings, setpoint, tolerance, null, null, unit, name);
