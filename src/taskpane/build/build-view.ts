@@ -3,18 +3,20 @@ import { button, freshId, make } from "../dom";
 import { rememberUse } from "../find/recent";
 import { isManyCells } from "../formula/arguments";
 import { localForm } from "../formula/local-form";
-import { isCellwise, rangeOf, type Shape } from "../formula/shape";
+import { isCellwise, rangeOf } from "../formula/shape";
 import type { Pane } from "../pane";
 import { shownResult } from "../understand/live-example";
-import { addressOn, cellName, parseAddress, parseBlock } from "../workbook/address";
-import type { FormulaCell, Traits, Workbook } from "../workbook/workbook";
+import { addressOn, parseAddress, parseBlock } from "../workbook/address";
+import type { FormulaCell, Traits } from "../workbook/workbook";
 import { type Draft, emptyDraft, formulaOf, givenOf } from "./draft";
 import { ExplainCard } from "./explain";
 import { Field } from "./field";
-import { type Form, grownOver, insert } from "./insert";
+import { functionChoice, oldExcelNote } from "./function-choice";
+import { type Form, insert } from "./insert";
 import { pickSelection } from "./pick";
+import { cellsInUse, freePlace, PAST_THE_END, placeOf, type ResultPlace } from "./place";
 import { type Preview, preview } from "./preview";
-import { filledBy, hindranceTo, seenFromElsewhere, suggestTarget, type Target } from "./target";
+import { seenFromElsewhere, suggestTarget, type Target } from "./target";
 
 const DELAY = 200;
 
@@ -331,16 +333,10 @@ export class BuildView {
     if (turn !== this.#turn) return;
     this.#target = target;
     this.#targetInput.placeholder = `${target.cell}, ${target.why}`;
-    const shape = this.#shown?.shape ?? { rows: 1, columns: 1 };
-    const area = filledBy(target, shape);
-    if (!area)
-      return this.#place(
-        "The result would run past the end of the sheet. Choose a place further up or left.",
-        true,
-      );
-    const own = this.#own && target.why === "its own cell" ? parseAddress(this.#own.range).range : undefined;
-    const { occupiedCount, hindrance } = await this.#inspect(target, area, own, shape);
+    const place = await this.#placeAt(target);
     if (turn !== this.#turn) return;
+    if (!place) return this.#place(PAST_THE_END, true);
+    const { area, shape, occupiedCount, hindrance } = place;
     const size = area.includes(":")
       ? `Fills ${area}, ${shape.rows} × ${shape.columns} cells`
       : `Fills ${area}`;
@@ -349,16 +345,11 @@ export class BuildView {
     else this.#place(`${size}; the space is free.`);
   }
 
-  async #inspect(target: Target, area: string, own: string | undefined, { rows, columns }: Shape) {
-    const workbook = this.#pane.workbook;
-    const places = own ? grownOver(area, own) : [area];
-    const looked = await Promise.all(places.map((range) => workbook.inspect(addressOn(target.sheet, range))));
-    const spills = this.#formWanted() === "spill" && rows * columns > 1;
-    return {
-      occupiedCount: looked.reduce((sum, { occupiedCount }) => sum + occupiedCount, 0),
-      occupied: looked.flatMap(({ occupied }) => occupied),
-      hindrance: looked.map((place) => hindranceTo(place, spills)).find((each) => each !== undefined),
-    };
+  #placeAt(target: Target): Promise<ResultPlace | undefined> {
+    const own = this.#own && target.why === "its own cell" ? parseAddress(this.#own.range).range : undefined;
+    // One cell while there is no preview.
+    const shape = this.#shown?.shape ?? { rows: 1, columns: 1 };
+    return placeOf(this.#pane.workbook, target, shape, own, this.#formWanted());
   }
 
   #formWanted(): Form {
@@ -384,12 +375,9 @@ export class BuildView {
     await this.#refresh();
     const given = givenOf(this.#draft(found));
     const target = this.#target ?? (await this.#findTarget(given));
-    const shape = this.#shown?.shape ?? { rows: 1, columns: 1 };
-    const area = filledBy(target, shape);
-    if (!area)
-      return this.#ask("The result would run past the end of the sheet. Choose a place further up or left.");
-    const own = this.#own && target.why === "its own cell" ? parseAddress(this.#own.range).range : undefined;
-    const { occupiedCount, occupied, hindrance } = await this.#inspect(target, area, own, shape);
+    const place = await this.#placeAt(target);
+    if (!place) return this.#ask(PAST_THE_END);
+    const { area, shape, occupiedCount, occupied, hindrance } = place;
     if (hindrance) {
       const byRow = isCellwise(found) && this.#formWanted() === "spill" && !hindrance.includes("protected");
       return this.#ask(hindrance, ...(byRow ? [this.#byRowButton()] : []), this.#elsewhereButton(target));
@@ -457,34 +445,3 @@ export class BuildView {
     rememberUse(this.#found.id);
   }
 }
-
-const cellsInUse = (count: number) => (count === 1 ? "1 cell is in use" : `${count} cells are in use`);
-
-/** The same row, in the second column after the last one in use. */
-async function freePlace(workbook: Workbook, { sheet, cell }: Target): Promise<string> {
-  const used = await workbook.getUsedRange(addressOn(sheet, cell));
-  return cellName(parseBlock(cell).row, used ? parseBlock(used).lastColumn + 2 : 0);
-}
-
-function functionChoice({ categories, functions }: Catalogue, id: string): HTMLSelectElement {
-  const choice = make(
-    "select",
-    { id, class: "field", name: "function" },
-    make("option", { value: "" }, "Choose a function…"),
-  );
-  for (const { name } of categories) {
-    const own = functions.filter(({ category }) => category === name);
-    if (own.length === 0) continue;
-    choice.append(
-      make("optgroup", { label: name }, ...own.map((each) => make("option", { value: each.id }, each.id))),
-    );
-  }
-  return choice;
-}
-
-const oldExcelNote = () =>
-  make(
-    "p",
-    { class: "hint" },
-    "This Excel has no dynamic arrays: one formula fills one cell. Write one formula in each row, or select the cells first and end a formula with Ctrl+Shift+Enter.",
-  );
