@@ -1,10 +1,10 @@
 import { BooleanNumber, HorizontalAlign, type IStyleData, VerticalAlign, WrapStrategy } from "@univerjs/core";
-import { type CellRole, type FormatName, numberFormats } from "../sheets";
+import { type CellRole, type FormatName, numberFormats, tones } from "../sheets";
 
 /** Colours of look.md for light paper; in the dark the engine turns them over itself. */
-const ink = { rgb: "#24262b" };
-const muted = { rgb: "#5e625f" };
-const slate = { rgb: "#2f5d73" };
+const ink = { rgb: `#${tones.ink}` };
+const muted = { rgb: `#${tones.muted}` };
+const slate = { rgb: `#${tones.slate}` };
 
 /** So that a text does not touch the number to its left. */
 const textPadding = { l: 8 };

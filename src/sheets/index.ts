@@ -13,3 +13,4 @@ export type {
   SheetPlan,
   WorkbookPlan,
 } from "./plan";
+export { tones } from "./tones";

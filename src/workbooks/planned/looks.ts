@@ -1,10 +1,7 @@
-import { type CellRole, type FormatName, numberFormats } from "../../sheets";
+import { type CellRole, type FormatName, numberFormats, tones } from "../../sheets";
 import type { CellLook } from "../content";
 
-/** Tones of the sheets that we write, on light paper. */
-const ink = "24262b";
-const muted = "5e625f";
-const slate = "2f5d73";
+const { ink, muted, slate } = tones;
 
 const bold = { bold: true, colour: ink };
 
