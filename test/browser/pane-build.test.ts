@@ -11,9 +11,8 @@ afterEach(() => closePage(sheet));
 const place = () => sheet.page.locator(".place-words").textContent();
 
 describe("the way from millivolts and terminal temperatures to a corrected column", () => {
-  it("takes under a minute by mouse", async () => {
+  it("is a handful of clicks by mouse", async () => {
     const { page } = sheet;
-    const started = Date.now();
     await searchOf(page).fill("millivolts cold junction");
     await page.getByRole("option").first().click();
     await page.getByRole("button", { name: "Build this formula" }).click();
@@ -28,7 +27,6 @@ describe("the way from millivolts and terminal temperatures to a corrected colum
     await expect.poll(place).toContain("Fills M8:M2007, 2000 × 1 cells; the space is free.");
     await page.getByRole("button", { name: "Insert formula" }).click();
     await waitForValue(page, "'Furnace log'!M2007", (value) => typeof value === "number");
-    expect(Date.now() - started).toBeLessThan(60_000);
     const [same, inserted] = [
       await readValues(page, "'Furnace log'!H8:H2007"),
       await readValues(page, "'Furnace log'!M8:M2007"),
@@ -37,9 +35,8 @@ describe("the way from millivolts and terminal temperatures to a corrected colum
     expect(await said(page)).toContain("Inserted in M8");
   });
 
-  it("takes under a minute by keyboard alone", async () => {
+  it("is open to the keyboard alone", async () => {
     const { page } = sheet;
-    const started = Date.now();
     await searchOf(page).focus();
     await page.keyboard.type("mv to deg cjc");
     await page.keyboard.press("Enter");
@@ -65,7 +62,6 @@ describe("the way from millivolts and terminal temperatures to a corrected colum
     }
     await page.keyboard.press("Enter");
     await waitForValue(page, "'Furnace log'!P2007", (value) => typeof value === "number");
-    expect(Date.now() - started).toBeLessThan(60_000);
     expect(await readValues(page, "'Furnace log'!M8:P2007")).toEqual(
       await readValues(page, "'Furnace log'!H8:K2007"),
     );

@@ -1,19 +1,15 @@
 import { defineConfig } from "vitest/config";
+import { areas } from "./areas.ts";
 
-/**
- * For `npm run mutation`: the tests that reach `core/thermoelectric` and `functions/cellwise` from their sources. What
- * runs on the built bundle would not see a mutant, and browser tests would take days.
- */
+const area = areas[process.env.MUTATION_AREA ?? ""];
+if (area === undefined) throw new Error(`MUTATION_AREA is one of ${Object.keys(areas).join(", ")}.`);
+
+/** For `npm run mutation`: only the tests that reach the area, and those that need no build. */
 export default defineConfig({
   test: {
-    include: [
-      "test/core/reference-functions.test.ts",
-      "test/core/junction/*.test.ts",
-      "test/published/{emf-tables,inverse-approximations,conversions,scale-differences}.test.ts",
-      "test/properties/{thermoelectric,cells,junction}.test.ts",
-      "test/functions/{bad-input,correct,judge}.test.ts",
-    ],
-    setupFiles: ["test/custom-functions-runtime.ts"],
+    include: [...area.tests],
+    exclude: ["test/functions/{examples,long-columns}.test.ts"],
+    setupFiles: ["test/custom-functions-runtime.ts", "test/property-seed.ts", "test/mutation/fewer-cases.ts"],
     testTimeout: 30_000,
   },
 });
