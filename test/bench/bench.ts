@@ -28,7 +28,7 @@ const NOT_QUICK = ["grid"];
 const given = process.argv.slice(2);
 const pace = given.includes("--quick") ? QUICK : FULL;
 const asked = given.filter((word) => word !== "--quick");
-const unknown = asked.find((word) => !(word in PARTS));
+const unknown = asked.find((word) => !Object.hasOwn(PARTS, word));
 if (unknown !== undefined) {
   console.error(`"${unknown}" is no part of the benchmark: ${Object.keys(PARTS).join(", ")}, --quick`);
   process.exit(2);

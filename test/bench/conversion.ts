@@ -42,7 +42,7 @@ export async function* conversionLines({ quick, slack }: Pace): AsyncGenerator<L
     { name: "call", run: () => void TEMPERATURE(column, [["K"]], [[25]]) },
     { name: "call with references", run: () => void TEMPERATURE(column, [["K"]], references) },
   ];
-  const time = bestTimes(works, quick ? 3 : 15);
+  const time = bestTimes(works, quick ? 3 : 10);
   if (!Number.isFinite(kept + converted.reduce((sum, t) => sum + t)))
     throw new Error("the benchmark converted a reading to nothing");
   const line = (what: string, name: string, limit: number): Line => ({

@@ -56,7 +56,7 @@ function lineOf(one: CatalogueFunction, call: WorksheetFunction, loop: Work, { q
   const amongFew = among(few);
   const works: Work[] = [loop, { name: "few", calls: warmUp(amongFew, quick ? 20 : 40), run: amongFew }];
   if (grows) works.push({ name: "many", run: among(many) });
-  const time = quick ? bestTimes(works, 2, 250) : bestTimes(works, 5, 2000);
+  const time = quick ? bestTimes(works, 2, 250) : bestTimes(works, 3, 1000);
   const evaluation = time("evaluations") / EVALUATIONS;
   const row = grows ? time("many") / many : time("few");
   return {
