@@ -4,10 +4,10 @@
  */
 import { type Thermocouple, thermocouple } from "../../src/core";
 import { builtFunctions, type WorksheetFunction } from "./built-functions";
-import { bestTimes, type Work } from "./ratio";
+import type { Line, Pace } from "./line";
+import { bestTimes, type Work } from "./processor-time";
 
 const READINGS = 1_000_000;
-const ROUNDS = 25;
 
 /** Spread evenly over 20 to 1350 °C in no order (multiples of the golden ratio). */
 function readings(couple: Thermocouple) {
@@ -18,13 +18,7 @@ function readings(couple: Thermocouple) {
   return { temperatures, emfs: temperatures.map((t) => couple.emf(t)) };
 }
 
-export interface Line {
-  readonly what: string;
-  readonly ratio: number;
-  readonly limit: number;
-}
-
-export async function convertLines(): Promise<Line[]> {
+export async function* conversionLines({ quick, slack }: Pace): AsyncGenerator<Line> {
   const couple = thermocouple("K") as Thermocouple;
   const { temperatures, emfs } = readings(couple);
   const column = Array.from(emfs, (emf) => [emf]);
@@ -48,17 +42,15 @@ export async function convertLines(): Promise<Line[]> {
     { name: "call", run: () => void TEMPERATURE(column, [["K"]], [[25]]) },
     { name: "call with references", run: () => void TEMPERATURE(column, [["K"]], references) },
   ];
-  const times = bestTimes(works, ROUNDS);
+  const time = bestTimes(works, quick ? 3 : 10);
   if (!Number.isFinite(kept + converted.reduce((sum, t) => sum + t)))
     throw new Error("the benchmark converted a reading to nothing");
-  const ratio = (name: string): number => (times.get(name) as number) / (times.get("evaluation") as number);
-  return [
-    { what: "exact inverse / one evaluation of the reference function", ratio: ratio("inverse"), limit: 1.5 },
-    { what: "one formula, 1 000 000 readings / bare loop of evaluations", ratio: ratio("call"), limit: 3.5 },
-    {
-      what: "the same with a reference temperature in each row",
-      ratio: ratio("call with references"),
-      limit: 4.5,
-    },
-  ];
+  const line = (what: string, name: string, limit: number): Line => ({
+    what,
+    ratio: time(name) / time("evaluation"),
+    limit: limit * slack,
+  });
+  yield line("exact inverse, to one evaluation of the reference function", "inverse", 1.5);
+  yield line("one formula over 1 000 000 readings, to the bare loop of evaluations", "call", 4);
+  yield line("the same with a reference temperature in every row", "call with references", 5.5);
 }
