@@ -11,6 +11,7 @@ import { cellStyle } from "./cell-styles";
 import { engineErrorMessage } from "./engine-errors";
 import type { ErrorMessages } from "./error-messages";
 import type { Grid } from "./grid";
+import { growTo } from "./grow";
 import { toSheetData } from "./sheet-data";
 import { SpilledResults } from "./spilled-results";
 import type { CellValue, FilledSheet, Workbook } from "./workbook";
@@ -133,7 +134,10 @@ export class GridWorkbook implements Workbook {
     const workbook = this.#workbook();
     const sheet = name === undefined ? workbook.getActiveSheet() : workbook.getSheetByName(name);
     if (!sheet) throw new Error(`there is no sheet named ${name}`);
-    for (const cell of range.split(":")) parseCell(cell);
+    for (const cell of range.split(":")) {
+      const { row, column } = parseCell(cell);
+      growTo(sheet, row, column);
+    }
     return sheet.getRange(range);
   }
 }

@@ -3,6 +3,7 @@ import { FUniver } from "@univerjs/core/facade";
 import { UniverSheetsCorePreset } from "@univerjs/preset-sheets-core";
 import english from "@univerjs/preset-sheets-core/locales/en-US";
 import "@univerjs/preset-sheets-core/lib/index.css";
+import { growWithSelection } from "./grow";
 import { followSystemTheme, gridTheme, systemIsDark } from "./theme";
 
 export interface Grid {
@@ -35,6 +36,7 @@ export function createGrid(container: HTMLElement, workbook: IWorkbookData): Gri
   }
   const api = FUniver.newAPI(univer);
   univer.createUnit(UniverInstanceType.UNIVER_SHEET, workbook);
+  growWithSelection(api);
   followSystemTheme((dark) => api.toggleDarkMode(dark));
   return { univer, api };
 }

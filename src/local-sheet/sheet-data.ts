@@ -1,11 +1,7 @@
 import { CellValueType, type ICellData, type IWorksheetData } from "@univerjs/core";
 import type { CellRole, CellValue, FilledSheet, FormatName, PlannedCell } from "../sheets";
 import { type CellStyles, cellStyle, styleName } from "./cell-styles";
-
-const spareRows = 100;
-const leastColumns = 20;
-const spareColumns = 8;
-const mostRows = 1_048_576;
+import { sheetFrame } from "./sheet-frame";
 
 export interface SheetData {
   sheet: Partial<IWorksheetData>;
@@ -51,22 +47,10 @@ export function toSheetData(id: string, sheet: FilledSheet): SheetData {
     put(cell.row, cell.column, { ...content(cell), s: styled(cell.role, cell.format) });
   }
 
-  const frozen = { xSplit: 0, ySplit: sheet.frozenRows, startRow: sheet.frozenRows, startColumn: -1 };
-  return {
-    sheet: {
-      id,
-      name: sheet.name,
-      cellData,
-      rowCount: Math.min(rows + spareRows, mostRows),
-      columnCount: Math.max(sheet.columns.length + spareColumns, leastColumns),
-      defaultColumnWidth: 96,
-      defaultRowHeight: 24,
-      columnData: Object.fromEntries(sheet.columns.map((column, index) => [index, { w: column.width }])),
-      rowData: Object.fromEntries((sheet.heights ?? []).map(({ row, height }) => [row, { h: height }])),
-      freeze: frozen,
-    },
-    styles,
-  };
+  const { name, frozenRows, heights } = sheet;
+  const widths = sheet.columns.map(({ width }) => width);
+  const frame = sheetFrame({ rows, columns: widths.length, frozenRows, widths, heights });
+  return { sheet: { id, name, cellData, ...frame }, styles };
 }
 
 function content({ value, formula }: PlannedCell): ICellData {

@@ -45,6 +45,19 @@ describe("typing into the local sheet", () => {
     expect(await readValues(page, on("A23"))).toEqual([[""]]);
   });
 
+  it("goes on beyond the end that the sheet has at first", async () => {
+    const { page } = sheet;
+    await goToCell(page, "BZ9000");
+    await page.keyboard.type('=BEAD.TEMPERATURE(4.096,"K",0)');
+    await page.keyboard.press("Enter");
+    // 4.096 mV is the table value of type K at 100 °C, IEC 60584-1.
+    const found = await waitForValue(page, on("BZ9000"), (value) => typeof value === "number");
+    expect(found).toBeCloseTo(100, 1);
+    expect(await readValues(page, on("A30000:B30000"))).toEqual([["", ""]]);
+    await expect(readValues(page, on("A1048577"))).rejects.toThrow("1048576 rows");
+    await goToCell(page, "A1");
+  });
+
   it("offers the functions with their sentence after =BEAD. and their arguments after the bracket", async () => {
     const { page } = sheet;
     await goToCell(page, "A20");

@@ -8,7 +8,7 @@ if (area === undefined) throw new Error(`MUTATION_AREA is one of ${Object.keys(a
 export default defineConfig({
   test: {
     include: [...area.tests],
-    exclude: ["test/functions/{examples,long-columns}.test.ts"],
+    exclude: ["test/functions/{examples,long-columns,surface}.test.ts"],
     setupFiles: ["test/custom-functions-runtime.ts", "test/property-seed.ts", "test/mutation/fewer-cases.ts"],
     testTimeout: 30_000,
   },

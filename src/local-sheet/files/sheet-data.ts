@@ -11,12 +11,7 @@ import {
   WrapStrategy,
 } from "@univerjs/core";
 import { type CellLook, isError, type StoredCell, type StoredSheet } from "../../workbooks";
-
-const spareRows = 100;
-const leastColumns = 20;
-const spareColumns = 8;
-const mostRows = 1_048_576;
-const mostColumns = 16_384;
+import { sheetFrame } from "../sheet-frame";
 
 const alignments = {
   left: HorizontalAlign.LEFT,
@@ -62,21 +57,9 @@ function sheetData(
     cellData[cell.row] ??= {};
     cellData[cell.row]![cell.column] = { ...content(cell), s: styled(cell.look) };
   }
-  const widths = sheet.columns.flatMap(({ width }, index) =>
-    width === undefined ? [] : [[index, { w: width }]],
-  );
-  return {
-    id,
-    name: sheet.name,
-    cellData,
-    rowCount: Math.min(rows + spareRows, mostRows),
-    columnCount: Math.min(Math.max(columns + spareColumns, leastColumns), mostColumns),
-    defaultColumnWidth: 96,
-    defaultRowHeight: 24,
-    columnData: Object.fromEntries(widths),
-    rowData: Object.fromEntries((sheet.heights ?? []).map(({ row, height }) => [row, { h: height }])),
-    freeze: { xSplit: 0, ySplit: sheet.frozenRows, startRow: sheet.frozenRows, startColumn: -1 },
-  };
+  const widths = sheet.columns.map(({ width }) => width);
+  const { name, frozenRows, heights } = sheet;
+  return { id, name, cellData, ...sheetFrame({ rows, columns, frozenRows, widths, heights }) };
 }
 
 function content({ value, formula }: StoredCell): ICellData {
