@@ -1,4 +1,4 @@
-/** Reads the pixels of a screenshot: a PNG without interlacing, eight bits a channel, with or without opacity. */
+/** Reads the pixels of a screenshot, or of a picture of ours: a PNG without interlacing, eight bits a channel. */
 import { inflateSync } from "node:zlib";
 import { chunks, imageSize } from "../../../src/build/png";
 
@@ -9,7 +9,8 @@ export interface Pixels {
   readonly colours: Uint32Array;
 }
 
-const CHANNELS: Readonly<Record<number, number>> = { 2: 3, 6: 4 };
+/** By kind of colour: red, green and blue; the number of a colour in the palette; with opacity. */
+const CHANNELS: Readonly<Record<number, number>> = { 2: 3, 3: 1, 6: 4 };
 
 /** Of the bytes to the left, above and above left, the one nearest to where a plane through them would be. */
 function paeth(left: number, above: number, corner: number): number {
@@ -26,6 +27,9 @@ const FILTERS: readonly ((left: number, above: number, corner: number) => number
   (left, above) => (left + above) >> 1,
   paeth,
 ];
+
+const colourAt = (bytes: Uint8Array, at: number): number =>
+  ((bytes[at] as number) << 16) | ((bytes[at + 1] as number) << 8) | (bytes[at + 2] as number);
 
 export function pixelsOf(png: Uint8Array): Pixels {
   const { width, height } = imageSize(png);
@@ -49,9 +53,10 @@ export function pixelsOf(png: Uint8Array): Pixels {
       bytes[at] = (filtered[at + y + 1] as number) + predict(left, above, corner);
     }
   }
+  const palette = all.find(({ name }) => name === "PLTE")?.content;
   const colours = Uint32Array.from({ length: width * height }, (_, i) => {
-    const [red = 0, green = 0, blue = 0] = bytes.subarray(i * channels, i * channels + 3);
-    return (red << 16) | (green << 8) | blue;
+    const at = i * channels;
+    return palette === undefined ? colourAt(bytes, at) : colourAt(palette, 3 * (bytes[at] as number));
   });
   return { width, height, colours };
 }
