@@ -31,7 +31,7 @@ export const ELSEWHERE: Readonly<Record<string, Place>> = {
   "npm run package -- --address https://…": packaged,
   "npm run package -- --address https://host/path": packaged,
   "SEED=7 npx vitest run --project unit test/properties": ci(
-    "SEED=7 npx vitest run --project unit test/properties/cells.test.ts",
+    "SEED=7 npx vitest run --project unit test/properties/junction.test.ts",
   ),
 };
 

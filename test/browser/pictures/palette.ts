@@ -1,5 +1,6 @@
 /** Writes pixels as a PNG of at most 256 colours: a page's text and lines lose nothing to the eye, and two thirds of the bytes. */
-import { crc32, deflateSync } from "node:zlib";
+import { deflateSync } from "node:zlib";
+import { framed } from "../../../src/build/png";
 import { frequencies, type Pixels } from "./pixels";
 
 const MOST = 256;
@@ -25,15 +26,6 @@ function paletteOf(colours: readonly number[]): number[] {
   }
 }
 
-function chunk(name: string, content: Uint8Array): Buffer {
-  const named = Buffer.concat([Buffer.from(name, "latin1"), content]);
-  const framed = Buffer.alloc(named.length + 8);
-  framed.writeUInt32BE(content.length, 0);
-  named.copy(framed, 4);
-  framed.writeUInt32BE(crc32(named), named.length + 4);
-  return framed;
-}
-
 export function withPalette({ width, height, colours }: Pixels): Buffer {
   const all = frequencies(colours).map(([colour]) => colour);
   const palette = paletteOf(all);
@@ -52,9 +44,9 @@ export function withPalette({ width, height, colours }: Pixels): Buffer {
   header.writeUInt32BE(height, 4);
   return Buffer.concat([
     SIGNATURE,
-    chunk("IHDR", header),
-    chunk("PLTE", Uint8Array.from(palette.flatMap(rgb))),
-    chunk("IDAT", deflateSync(rows, { level: 9 })),
-    chunk("IEND", new Uint8Array()),
+    framed({ name: "IHDR", content: header }),
+    framed({ name: "PLTE", content: Uint8Array.from(palette.flatMap(rgb)) }),
+    framed({ name: "IDAT", content: deflateSync(rows, { level: 9 }) }),
+    framed({ name: "IEND", content: new Uint8Array() }),
   ]);
 }

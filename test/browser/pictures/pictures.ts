@@ -1,6 +1,6 @@
 /** The README's pictures: what is on each, and the steps of a user that lead there. */
 import type { Locator, Page } from "playwright-core";
-import { openView, paneOf, searchOf, select } from "../setup/pane";
+import { fillFromSelection, openView, paneOf, searchOf, select } from "../setup/pane";
 import { goToCell, waitForValue } from "../setup/sheet-page";
 
 export const FOLDER = "samples/pictures";
@@ -78,12 +78,10 @@ const builder: Picture = {
     await openFunction(page, "millivolts cold junction");
     await page.getByRole("button", { name: "Build this formula" }).click();
     await select(page, "'Furnace log'!B8:E8");
-    await page.getByRole("button", { name: "Use selection for emf" }).click();
-    await page.getByRole("button", { name: "Down to row 2007" }).click();
+    await fillFromSelection(page, "emf");
     await page.getByLabel(/^type/).selectOption("K");
     await goToCell(page, "F8");
-    await page.getByRole("button", { name: "Use selection for referenceTemperature" }).click();
-    await page.getByRole("button", { name: "Down to row 2007" }).click();
+    await fillFromSelection(page, "referenceTemperature");
     await page.getByText("the space is free").waitFor();
     await page.getByText("and 1994 more rows").waitFor();
     await page.getByRole("button", { name: "Insert formula" }).scrollIntoViewIfNeeded();
