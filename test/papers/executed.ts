@@ -12,6 +12,7 @@ export interface Place {
 const ci = (as: string): Place => ({ file: ".ci/run", as });
 
 const packaged = ci("npm run package -- --address https://your.host/beadline");
+const quickBench = ci("npm run bench -- --quick");
 const dryRun = ci("npm run mutation -- --dry-run junction");
 
 export const ELSEWHERE: Readonly<Record<string, Place>> = {
@@ -22,7 +23,8 @@ export const ELSEWHERE: Readonly<Record<string, Place>> = {
   "npm start": ci('npx tsx test/papers/serves.ts "npm start"'),
   "npm start -- --port 5700": ci('npx tsx test/papers/serves.ts "npm start -- --port 5700"'),
   "npm run pictures": { file: "test/browser/pictures.test.ts", as: "`npm run pictures -- " },
-  "npm run bench": ci("npm run bench -- --quick"),
+  "npm run bench": quickBench,
+  "npm run bench -- Screen": quickBench,
   // Hours; the dry run goes through everything but the mutants.
   "npm run mutation": dryRun,
   "npm run mutation -- survey log": dryRun,
