@@ -4,6 +4,7 @@
  */
 import { type Thermocouple, thermocouple } from "../../src/core";
 import { builtFunctions, type WorksheetFunction } from "./built-functions";
+import { type Limit, limits } from "./limits";
 import { bestTimes, type Work } from "./ratio";
 
 const READINGS = 1_000_000;
@@ -18,10 +19,8 @@ function readings(couple: Thermocouple) {
   return { temperatures, emfs: temperatures.map((t) => couple.emf(t)) };
 }
 
-export interface Line {
-  readonly what: string;
+export interface Line extends Limit {
   readonly ratio: number;
-  readonly limit: number;
 }
 
 export async function convertLines(): Promise<Line[]> {
@@ -53,12 +52,8 @@ export async function convertLines(): Promise<Line[]> {
     throw new Error("the benchmark converted a reading to nothing");
   const ratio = (name: string): number => (times.get(name) as number) / (times.get("evaluation") as number);
   return [
-    { what: "exact inverse / one evaluation of the reference function", ratio: ratio("inverse"), limit: 1.5 },
-    { what: "one formula, 1 000 000 readings / bare loop of evaluations", ratio: ratio("call"), limit: 3.5 },
-    {
-      what: "the same with a reference temperature in each row",
-      ratio: ratio("call with references"),
-      limit: 4.5,
-    },
+    { ...limits.inverse, ratio: ratio("inverse") },
+    { ...limits.formula, ratio: ratio("call") },
+    { ...limits.references, ratio: ratio("call with references") },
   ];
 }
