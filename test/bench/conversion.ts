@@ -4,6 +4,7 @@
  */
 import { type Thermocouple, thermocouple } from "../../src/core";
 import { builtFunctions, type WorksheetFunction } from "./built-functions";
+import { type Limit, limits } from "./limits";
 import type { Line, Pace } from "./line";
 import { bestTimes, type Work } from "./processor-time";
 
@@ -45,12 +46,12 @@ export async function* conversionLines({ quick, slack }: Pace): AsyncGenerator<L
   const time = bestTimes(works, quick ? 3 : 10);
   if (!Number.isFinite(kept + converted.reduce((sum, t) => sum + t)))
     throw new Error("the benchmark converted a reading to nothing");
-  const line = (what: string, name: string, limit: number): Line => ({
+  const line = ({ what, limit }: Limit, name: string): Line => ({
     what,
     ratio: time(name) / time("evaluation"),
     limit: limit * slack,
   });
-  yield line("exact inverse, to one evaluation of the reference function", "inverse", 1.5);
-  yield line("one formula over 1 000 000 readings, to the bare loop of evaluations", "call", 4);
-  yield line("the same with a reference temperature in every row", "call with references", 5.5);
+  yield line(limits.inverse, "inverse");
+  yield line(limits.formula, "call");
+  yield line(limits.references, "call with references");
 }

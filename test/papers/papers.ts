@@ -7,7 +7,7 @@ export interface Paper {
   readonly text: string;
 }
 
-const FOLDERS = ["src", "test", "samples", "evidence", ".ci"];
+const FOLDERS = ["src", "test", "samples", ".ci"];
 
 const read = (file: string): Paper => ({ file, text: readFileSync(file, "utf8").replaceAll("\r\n", "\n") });
 
