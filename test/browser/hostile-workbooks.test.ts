@@ -1,8 +1,8 @@
 /** Workbook files that mean harm, in the browser with its own parser; each kind in test/workbooks/hostile-files.test.ts. */
-import { readFileSync } from "node:fs";
 import ExcelJS from "exceljs";
 import { afterAll, beforeAll, expect, it } from "vitest";
 import { formulas, handMade, partsOf, zipped } from "../workbooks/hand-made";
+import { savedFile } from "./setup/saved-file";
 import { closePage, openSheet, readValues, type WatchedPage, waitForValue } from "./setup/sheet-page";
 
 let sheet: WatchedPage;
@@ -13,18 +13,6 @@ afterAll(() => closePage(sheet));
 
 const openBook = (bytes: Uint8Array, name: string) =>
   sheet.page.locator("#log-file").setInputFiles({ name, mimeType: "", buffer: Buffer.from(bytes) });
-
-async function savedCells(): Promise<ExcelJS.Worksheet> {
-  const { page } = sheet;
-  await page.locator("#save").click();
-  const [download] = await Promise.all([
-    page.waitForEvent("download"),
-    page.locator("#files").getByRole("button", { name: "Save workbook" }).click(),
-  ]);
-  const book = new ExcelJS.Workbook();
-  await book.xlsx.load(readFileSync(await download.path()).buffer as ArrayBuffer);
-  return book.worksheets[0]!;
-}
 
 it("a file that defines texts which grow without end is refused in words, and the open sheets stay", async () => {
   const { page } = sheet;
@@ -69,7 +57,10 @@ it("formulas that are typed and reach outside ask nobody, and start nothing from
   await page.evaluate(() => window.beadlineSheet!.setFormula("S!A20", "=1+1"));
   await waitForValue(page, "S!A20", (value) => value === 2);
   expect(await page.locator("#grid a[href]").count()).toBe(0);
-  const saved = await savedCells();
+  const { path } = await savedFile(page, "Save workbook");
+  const book = new ExcelJS.Workbook();
+  await book.xlsx.readFile(path);
+  const saved = book.worksheets[0]!;
   for (const [index, formula] of typed.slice(0, 2).entries()) {
     expect(saved.getCell(index + 3, 1).formula).toBeUndefined();
     expect(saved.getCell(index + 3, 1).value).toBe(formula);
