@@ -178,6 +178,12 @@ test.each<[string, string | RegExp, string, string]>([
     "<ShowTaskpane> refers to",
   ],
   [
+    "a pane that workbooks cannot ask for",
+    "Office.AutoShowTaskpaneWithDocument",
+    "Beadline.Pane",
+    'the pane is named "Beadline.Pane"',
+  ],
+  [
     "too new a function runtime",
     'Name="CustomFunctionsRuntime" MinVersion="1.3"',
     'Name="CustomFunctionsRuntime" MinVersion="1.4"',
