@@ -18,11 +18,15 @@ import {
 } from "./record";
 import { contractWorkbook } from "./workbook";
 
-/** Calls of earlier records that now give something else, and did not when the last of them was frozen. */
+/**
+ * Calls of the records before a version that now give something else, and did not when the last of them was frozen.
+ * Until the version is set, what was built calls itself by another.
+ */
 export function changedCalls(
   built: Functions,
   records: readonly VersionRecord[],
   version: string,
+  builtAs = version,
 ): Pick<FrozenCall, "id" | "given">[] {
   const earlier = records.filter((record) => record.version !== version);
   const known = new Set(earlier.flatMap(({ changed }) => changed.map(keyOf)));
@@ -31,7 +35,7 @@ export function changedCalls(
       .filter(
         (call) =>
           !known.has(keyOf(call)) &&
-          !sameResult(call.result, resultOf(built, call), [record.version, version]),
+          !sameResult(call.result, resultOf(built, call), [record.version, builtAs]),
       )
       .map(({ id, given }) => ({ id, given })),
   );
