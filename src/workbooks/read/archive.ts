@@ -1,8 +1,14 @@
 import { strFromU8, unzipSync } from "fflate";
 import type { ParseXml, XmlNode } from "./xml-node";
 
-/** All parts that are read together. A file of some kilobytes can hold more than a browser's memory. */
-const mostBytes = 300_000_000;
+/**
+ * All parts that are read together. A file of some kilobytes can hold more than a browser's memory: of a sheet with a
+ * million cells, 40 MB unpacked, the parsed part takes well over half a gigabyte.
+ */
+const mostBytes = 150_000_000;
+
+/** Beginnings and ends of elements in one part: a cell with a value has four, an empty one that does harm has one. */
+const mostMarks = 16_000_000;
 
 /** Of any kind. A workbook has some dozens; a forged list of contents can claim thousands of millions. */
 const mostParts = 10_000;
@@ -22,7 +28,7 @@ export class Archive {
           if (++parts > mostParts) throw new TooLarge(`it has more than ${mostParts} parts`);
           if (!/\.(xml|rels)$/i.test(name)) return false;
           total += originalSize;
-          if (total > mostBytes) throw new TooLarge("it is larger than 300 MB unpacked");
+          if (total > mostBytes) throw new TooLarge("it is larger than 150 MB unpacked");
           return true;
         },
       });
@@ -41,6 +47,7 @@ export class Archive {
     // Workbook files must have none. One could define texts that grow without end while they are read.
     if (text.includes("<!DOCTYPE"))
       throw new Error("it is damaged: a part of it brings definitions of its own");
+    if (hasMoreMarks(text, mostMarks)) throw new Error("it holds more cells than a browser's page can take");
     return this.#parse(text);
   }
 
@@ -52,6 +59,15 @@ export class Archive {
 }
 
 class TooLarge extends Error {}
+
+function hasMoreMarks(text: string, most: number): boolean {
+  let at = -1;
+  for (let count = 0; count <= most; count++) {
+    at = text.indexOf("<", at + 1);
+    if (at < 0) return false;
+  }
+  return true;
+}
 
 /** A relation's target from the part that names it. */
 export function targetFrom(part: string, target: string): string {
