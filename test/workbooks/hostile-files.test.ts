@@ -98,7 +98,7 @@ describe("an opened workbook that is too much", () => {
 
   it("is refused where the sum of its parts is too much, though each is not", () => {
     // Six parts that lie on one another in the archive, each of 30 MB: a few kilobytes as a file.
-    const part = zipSync({ "a.xml": new Uint8Array(30_000_000) }, { level: 9 });
+    const part = zipSync({ "a.xml": new Uint8Array(30_000_000) });
     const listAt = part.findIndex((_, i) => entryMark.every((byte, k) => part[i + k] === byte));
     const end = part.length - 22;
     const entry = part.subarray(listAt, end);
@@ -116,10 +116,13 @@ describe("an opened workbook that is too much", () => {
   it("is refused where its cells are empty and without number", () => {
     const parts = partsOf({});
     const row = `<row>${"<c/>".repeat(16_000)}</row>`;
-    const bytes = zipSync({
-      ...Object.fromEntries(Object.entries(parts).map(([name, text]) => [name, strToU8(text)])),
-      "xl/s.xml": strToU8(`<worksheet><sheetData>${row.repeat(1001)}</sheetData></worksheet>`),
-    });
+    const bytes = zipSync(
+      {
+        ...Object.fromEntries(Object.entries(parts).map(([name, text]) => [name, strToU8(text)])),
+        "xl/s.xml": strToU8(`<worksheet><sheetData>${row.repeat(1001)}</sheetData></worksheet>`),
+      },
+      { level: 1 },
+    );
     expect(bytes.length).toBeLessThan(1_000_000);
     expect(() => read(bytes)).toThrow("it holds more cells than a browser's page can take");
   });
