@@ -6,6 +6,20 @@ export interface StoredWorkbook {
   title: string;
   description?: string;
   sheets: StoredSheet[];
+  /** The add-in whose pane opens with the workbook, where it is installed from that place. */
+  opensPane?: PaneReference;
+}
+
+/** [MS-OWEXML] 2.2.5: which add-in of which catalogue. A reference that the reader's Excel has not got opens nothing. */
+export interface PaneReference {
+  /** The manifest's Id. */
+  id: string;
+  /** The manifest's Version, of four numbers. */
+  version: string;
+  /** Given out to all by the administrator; from a shared folder; or registered on one machine by a developer. */
+  storeType: "EXCatalog" | "FileSystem" | "Registry";
+  /** "EXCatalog"; the folder's path; "developer". */
+  store: string;
 }
 
 export interface StoredSheet {

@@ -1,6 +1,7 @@
 export {
   type CellLook,
   isError,
+  type PaneReference,
   type StoredCell,
   type StoredError,
   type StoredSheet,

@@ -1,8 +1,7 @@
 import { readdirSync, readFileSync } from "node:fs";
-import { tmpdir } from "node:os";
-import { join } from "node:path";
 import ExcelJS from "exceljs";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { savedFile } from "./setup/saved-file";
 import { closePage, openSheet, readValues, type WatchedPage, waitForValue } from "./setup/sheet-page";
 
 let sheet: WatchedPage;
@@ -23,17 +22,7 @@ async function open(file: string): Promise<void> {
   );
 }
 
-async function saveAs(button: string): Promise<{ name: string; path: string }> {
-  const { page } = sheet;
-  await page.locator("#save").click();
-  const [download] = await Promise.all([
-    page.waitForEvent("download"),
-    page.locator("#files").getByRole("button", { name: button }).click(),
-  ]);
-  const path = join(tmpdir(), `beadline-${process.pid}-${download.suggestedFilename()}`);
-  await download.saveAs(path);
-  return { name: download.suggestedFilename(), path };
-}
+const saveAs = (button: string) => savedFile(sheet.page, button);
 
 /** What a file holds, cell by cell, as the local sheet shows values. */
 async function fileCells(path: string) {

@@ -5,12 +5,12 @@
 import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { loadBuiltFunctions } from "../../src/build/built-functions";
+import { callsToFreeze } from "../../src/build/contract/calls";
+import { isUnreleased, resultsChanged, unannounced } from "../../src/build/contract/changelog";
+import { frozenRecords } from "../../src/build/contract/frozen";
+import { keyOf, resultOf, sameResult } from "../../src/build/contract/record";
 import catalogue from "../../src/catalogue/catalogue.json";
 import metadata from "../../src/catalogue/functions.json";
-import { callsToFreeze } from "./calls";
-import { isUnreleased, resultsChanged, unannounced } from "./changelog";
-import { keyOf, resultOf, sameResult } from "./record";
-import { frozenRecords } from "./records";
 
 const built = loadBuiltFunctions(readFileSync("dist/functions.js", "utf8"));
 const records = frozenRecords();

@@ -13,6 +13,7 @@ const ci = (as: string): Place => ({ file: ".ci/run", as });
 
 const packaged = ci("npm run package -- --address https://your.host/beadline");
 const quickBench = ci("npm run bench -- --quick");
+const releaseTest: Place = { file: "test/build/release/release.test.ts", as: 'describe("npm run release"' };
 const dryRun = ci("npm run mutation -- --dry-run junction");
 
 export const ELSEWHERE: Readonly<Record<string, Place>> = {
@@ -32,6 +33,9 @@ export const ELSEWHERE: Readonly<Record<string, Place>> = {
   "npm run package": packaged,
   "npm run package -- --address https://…": packaged,
   "npm run package -- --address https://host/path": packaged,
+  // In a copy of the project: it would change this one.
+  "npm run release": releaseTest,
+  "npm run release -- 0.2.0": releaseTest,
   "SEED=7 npx vitest run --project unit test/properties": ci(
     "SEED=7 npx vitest run --project unit test/properties/junction.test.ts",
   ),

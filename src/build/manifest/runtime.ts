@@ -7,6 +7,9 @@ import { allNamed, at, type Element } from "./element";
 const HIGHEST_SETS: Record<string, string> = { CustomFunctionsRuntime: "1.3", SharedRuntime: "1.1" };
 const NAMESPACE = "BEAD";
 
+/** [MS-OWEMXML]: by this name a workbook that refers to the add-in asks for its pane, and there may be one. */
+const OPENED_BY_WORKBOOKS = "Office.AutoShowTaskpaneWithDocument";
+
 export function checkRuntime(root: Element): string[] {
   const runtime = allNamed(root, "Runtime")[0];
   const page = runtime?.attributes.resid;
@@ -25,6 +28,9 @@ export function checkRuntime(root: Element): string[] {
     if (resid !== page)
       faults.push(`<${name}> refers to "${resid}", the runtime to "${page}": they must share one`);
   }
+  const panes = allNamed(root, "TaskpaneId").map(({ text }) => text);
+  if (panes.join() !== OPENED_BY_WORKBOOKS)
+    faults.push(`the pane is named "${panes}"; workbooks ask for ${OPENED_BY_WORKBOOKS}`);
   return [...faults, ...checkSets(root), ...checkNamespace(root)];
 }
 

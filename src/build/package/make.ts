@@ -9,6 +9,7 @@ import { hostingNote } from "./hosting";
 import { copyOffice, withOwnOffice } from "./office";
 import type { PackageOptions } from "./options";
 import { ADDRESSED, readdressed, strayHelpAddresses } from "./readdressed";
+import { addSamplesWithPane } from "./with-pane";
 
 export interface Sources {
   /** The built files. */
@@ -32,7 +33,7 @@ const moment = new Date(2026, 0, 1);
 
 /** Makes it anew; throws with every fault found, and leaves nothing half made. */
 export function makePackage(
-  { address, offline }: PackageOptions,
+  { address, offline, openPane }: PackageOptions,
   { dist, officeJs, version, out }: Sources,
 ): Package {
   const name = `beadline-${version}${offline ? "-offline" : ""}`;
@@ -48,7 +49,8 @@ export function makePackage(
     for (const file of filesIn(folder).filter((each) => each.endsWith(".html"))) rewrite(file, withOwnOffice);
     copyOffice(officeJs, folder);
   }
-  writeFileSync(join(folder, "HOSTING.txt"), hostingNote(address, version, offline));
+  if (openPane) addSamplesWithPane(folder, openPane);
+  writeFileSync(join(folder, "HOSTING.txt"), hostingNote(address, version, offline, openPane));
   const faults = faultsOf(folder, address, version);
   if (faults.length > 0) {
     rmSync(folder, { recursive: true, force: true });

@@ -21,7 +21,7 @@ export function csvText({ cells }: StoredSheet): string {
 function field({ value, look }: StoredCell): string {
   if (typeof value === "number") return isDate(look?.pattern) ? isoDate(value) : String(value);
   if (typeof value === "boolean") return value ? "TRUE" : "FALSE";
-  if (isError(value)) return value.error;
+  if (isError(value)) return quoted(withoutFormula(value.error));
   return quoted(withoutFormula(value ?? ""));
 }
 
@@ -31,7 +31,7 @@ const formulaStart = /^[=+\-@\t\r\n＝＋－＠]/;
 export const withoutFormula = (text: string): string => (formulaStart.test(text) ? `'${text}` : text);
 
 const quoted = (text: string): string =>
-  /[",\r\n;]|^\s|\s$/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
+  /[",\t\r\n;]|^\s|\s$/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
 
 /** Of a format without its quoted words and colours, any letter of a date or a time. */
 const isDate = (pattern = ""): boolean =>

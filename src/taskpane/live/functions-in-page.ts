@@ -3,7 +3,7 @@ import { functionsRuntime, type WorksheetFunction } from "../../catalogue/functi
 interface PageOfFunctions {
   /** Published by functions.js, which stands before the pane in its page and before the grid in the other. */
   readonly BeadlineFunctions?: Readonly<Record<string, WorksheetFunction>>;
-  CustomFunctions?: unknown;
+  CustomFunctions?: { Error?: unknown };
 }
 
 /**
@@ -14,7 +14,9 @@ export function functionInPage(id: string): WorksheetFunction | undefined {
   const page = globalThis as PageOfFunctions;
   const found = page.BeadlineFunctions;
   if (!found || !Object.hasOwn(found, id)) return undefined;
-  // Opened in an ordinary browser the page has no runtime whose errors the functions could give.
-  page.CustomFunctions ??= functionsRuntime().CustomFunctions;
+  // Opened in an ordinary browser the page has no runtime whose errors the functions could give: none at all, or with
+  // Office.js one that only takes functions.
+  if (typeof page.CustomFunctions?.Error !== "function")
+    page.CustomFunctions = Object.assign(functionsRuntime().CustomFunctions, page.CustomFunctions);
   return found[id];
 }

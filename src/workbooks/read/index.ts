@@ -30,17 +30,23 @@ export function readWorkbook(bytes: Uint8Array, parse: ParseXml): ReadWorkbook {
     texts: [...children(part("sharedStrings"), "si")].map(textOf),
   };
   const leftOut = new Set<string>();
+  if (relations.some(({ type }) => type.endsWith("/vbaProject"))) leftOut.add("macros");
   const sheets: StoredSheet[] = [];
   for (const sheet of children(down(workbook, "sheets"), "sheet")) {
     const id = attribute(sheet, "r:id") ?? attribute(sheet, "id");
     const relation = relations.find((each) => each.id === id);
     if (!relation?.type.endsWith("/worksheet")) {
-      leftOut.add("sheets that are charts");
+      leftOut.add(
+        relation?.type.endsWith("/chartsheet") ? "sheets that are charts" : "sheets of an unknown kind",
+      );
       continue;
     }
     const root = archive.root(relation.target);
     for (const [element, words] of unread) if (down(root, element)) leftOut.add(words);
-    sheets.push(readSheet(attribute(sheet, "name") ?? `Sheet ${sheets.length + 1}`, root, surroundings));
+    const name = attribute(sheet, "name") ?? `Sheet ${sheets.length + 1}`;
+    const { left, ...read } = readSheet(name, root, surroundings);
+    for (const words of left) leftOut.add(words);
+    sheets.push(read);
   }
   if (sheets.length === 0) throw new Error("it holds no worksheet");
   if (hasOwnNames(workbook)) leftOut.add("names of ranges");
@@ -54,6 +60,7 @@ const unread = [
   ["dataValidations", "rules for input"],
   ["tableParts", "tables (their cells are there)"],
   ["legacyDrawing", "comments"],
+  ["hyperlinks", "links"],
 ] as const;
 
 /** Names other than the file's own for print areas and filters. */

@@ -1,5 +1,7 @@
 import type { StoredWorkbook } from "../content";
 import { element, escapedText, part } from "../xml";
+import { paneKinds, paneParts, paneRelation } from "./pane-parts";
+import { relationships } from "./relationships";
 import { usedRange } from "./sheet-part";
 
 const main = "http://schemas.openxmlformats.org/spreadsheetml/2006/main";
@@ -30,22 +32,12 @@ const documentParts = [
   ],
 ] as const;
 
-const relationships = (list: readonly (readonly [target: string, type: string])[]): string =>
-  part(
-    element(
-      "Relationships",
-      { xmlns: `${packaged}/relationships` },
-      ...list.map(([Target, Type], index) =>
-        element("Relationship", { Id: `rId${index + 1}`, Type, Target }),
-      ),
-    ),
-  );
-
-function contentTypes(sheetCount: number): string {
+function contentTypes({ sheets, opensPane }: StoredWorkbook): string {
   const parts = [
     ...documentParts.map(([name, type]) => [name, type] as const),
-    ...Array.from({ length: sheetCount }, (_, i) => [`xl/${sheetFile(i)}`, `${kind}.worksheet+xml`] as const),
+    ...sheets.map((_, i) => [`xl/${sheetFile(i)}`, `${kind}.worksheet+xml`] as const),
     ...companions.map(([name, type]) => [`xl/${name}`, type] as const),
+    ...(opensPane ? paneKinds : []),
   ];
   return part(
     element(
@@ -165,8 +157,11 @@ const application = part(
 export function packageParts(workbook: StoredWorkbook): Record<string, string> {
   const sheetRelations = workbook.sheets.map((_, i) => [sheetFile(i), `${relation}/worksheet`] as const);
   return {
-    "[Content_Types].xml": contentTypes(workbook.sheets.length),
-    "_rels/.rels": relationships(documentParts.map(([name, , type]) => [name, type] as const)),
+    "[Content_Types].xml": contentTypes(workbook),
+    "_rels/.rels": relationships([
+      ...documentParts.map(([name, , type]) => [name, type] as const),
+      ...(workbook.opensPane ? [paneRelation] : []),
+    ]),
     "docProps/app.xml": application,
     "docProps/core.xml": coreProperties(workbook),
     "xl/workbook.xml": workbookPart(workbook),
@@ -175,5 +170,6 @@ export function packageParts(workbook: StoredWorkbook): Record<string, string> {
       ...companions.map(([name, , type]) => [name, `${relation}/${type}`] as const),
     ]),
     "xl/metadata.xml": metadata,
+    ...(workbook.opensPane ? paneParts(workbook.opensPane) : {}),
   };
 }

@@ -1,5 +1,6 @@
 import { cellName, columnName } from "../../sheets";
 import { isError, type StoredCell, type StoredSheet } from "../content";
+import { linksOutside } from "../outside-formula";
 import { couldSpill, toStored } from "../stored-formula";
 import { element, escaped, escapedText, part } from "../xml";
 import type { SharedStrings } from "./shared-strings";
@@ -88,13 +89,18 @@ function rows({ cells, heights = [] }: StoredSheet, styles: Styles, strings: Sha
     });
 }
 
-function cellElement(cell: StoredCell, styles: Styles, strings: SharedStrings): string {
-  const { formula, look } = cell;
+/** What Excel would take for a formula when somebody edits the cell, and an apostrophe that it would take for a mark. */
+const likeFormula = /^[=+\-@'＝＋－＠]/;
+
+function cellElement(planned: StoredCell, styles: Styles, strings: SharedStrings): string {
+  const cell = disarmed(planned);
+  const { formula, look = {}, value } = cell;
+  const isMarkedText = formula === undefined && typeof value === "string" && likeFormula.test(value);
   const isDynamic = formula !== undefined && (cell.spill !== undefined || couldSpill(formula));
   const [type, content] = valueElement(cell, strings);
   const attributes = {
     r: cellName(cell.row, cell.column),
-    s: (look && styles.index(look)) || undefined,
+    s: styles.index(look, isMarkedText) || undefined,
     t: type,
     // The first and only entry of metadata.xml: a dynamic array.
     cm: isDynamic ? 1 : undefined,
@@ -102,6 +108,16 @@ function cellElement(cell: StoredCell, styles: Styles, strings: SharedStrings): 
   if (formula === undefined) return element("c", attributes, ...content);
   const array = isDynamic ? { t: "array", ref: filledRange(cell) } : {};
   return element("c", attributes, element("f", array, escaped(toStored(formula))), ...content);
+}
+
+/**
+ * A formula that was typed here and takes something from another file or program is kept as a text: what it gives is
+ * not known here, and no file of ours starts anything.
+ */
+function disarmed(cell: StoredCell): StoredCell {
+  if (cell.formula === undefined || !linksOutside(cell.formula)) return cell;
+  const { formula, spill: _, ...rest } = cell;
+  return { ...rest, value: formula };
 }
 
 function filledRange({ row, column, spill: [down, across] = [1, 1] }: StoredCell): string {

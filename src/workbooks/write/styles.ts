@@ -4,7 +4,12 @@ import { element, part } from "../xml";
 const main = "http://schemas.openxmlformats.org/spreadsheetml/2006/main";
 
 /** Formats that every program knows by number; our own are numbered from 164. */
-const known: Record<string, number> = { General: 0, "0": 1, "0.00": 2, "0%": 9 };
+const known: ReadonlyMap<string, number> = new Map([
+  ["General", 0],
+  ["0", 1],
+  ["0.00", 2],
+  ["0%", 9],
+]);
 const firstOwn = 164;
 
 /** Looks of cells, each kept once; a cell refers to its look by number, and 0 is the plain one. */
@@ -17,8 +22,9 @@ export class Styles {
     this.index({});
   }
 
-  index(look: CellLook): number {
-    return numbered(this.#looks, this.#cellFormat(look));
+  /** A text that is marked as typed behind an apostrophe stays a text when somebody edits its cell. */
+  index(look: CellLook, isMarkedText = false): number {
+    return numbered(this.#looks, this.#cellFormat(look, isMarkedText));
   }
 
   xml(): string {
@@ -47,8 +53,11 @@ export class Styles {
     );
   }
 
-  #cellFormat({ pattern = "General", align, indented, wrapped, ...font }: CellLook): string {
-    const numFmtId = known[pattern] ?? numbered(this.#formats, pattern, firstOwn);
+  #cellFormat(
+    { pattern = "General", align, indented, wrapped, ...font }: CellLook,
+    isMarkedText: boolean,
+  ): string {
+    const numFmtId = known.get(pattern) ?? numbered(this.#formats, pattern, firstOwn);
     const fontId = numbered(this.#fonts, fontElement(font));
     const alignment =
       align || wrapped || indented
@@ -69,6 +78,7 @@ export class Styles {
         fillId: 0,
         borderId: 0,
         xfId: 0,
+        quotePrefix: isMarkedText ? 1 : undefined,
         applyNumberFormat: numFmtId ? 1 : undefined,
         applyFont: fontId ? 1 : undefined,
         applyAlignment: alignment.length > 0 ? 1 : undefined,

@@ -178,6 +178,12 @@ test.each<[string, string | RegExp, string, string]>([
     "<ShowTaskpane> refers to",
   ],
   [
+    "a pane that workbooks cannot ask for",
+    "Office.AutoShowTaskpaneWithDocument",
+    "Beadline.Pane",
+    'the pane is named "Beadline.Pane"',
+  ],
+  [
     "too new a function runtime",
     'Name="CustomFunctionsRuntime" MinVersion="1.3"',
     'Name="CustomFunctionsRuntime" MinVersion="1.4"',
@@ -212,6 +218,9 @@ test("several faults are all told", () => {
 });
 
 test("a version of package.json that moved on is noticed", () => {
-  const moved = { ...surroundings, packageVersion: "0.2.0" };
-  expect(checkManifest(xml, moved)).toEqual(["the Version is 0.1.0.0; package.json asks for 0.2.0.0"]);
+  const moved = { ...surroundings, packageVersion: "99.0.0" };
+  const { packageVersion } = surroundings;
+  expect(checkManifest(xml, moved)).toEqual([
+    `the Version is ${packageVersion}.0; package.json asks for 99.0.0.0`,
+  ]);
 });

@@ -1,11 +1,13 @@
-import { existsSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from "node:fs";
+import { existsSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { cp } from "node:fs/promises";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { unzipSync } from "fflate";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import packageFile from "../../../package.json";
+import { FIXED_ID } from "../../../src/build/manifest/identity";
 import { makePackage, type Package } from "../../../src/build/package/make";
+import { paneReference } from "../../../src/build/package/with-pane";
 
 const scratch = mkdtempSync(join(tmpdir(), "beadline-package-"));
 afterAll(() => rmSync(scratch, { recursive: true, force: true }));
@@ -76,6 +78,39 @@ describe("a package for a plant without internet", () => {
     for (const file of ["word-win32-16.01.js", "excel-web-16.00.debug.js", "en-us/outlook_strings.js"]) {
       expect(existsSync(join(folder, "office", file))).toBe(false);
     }
+  });
+});
+
+describe("a package whose samples open the pane", () => {
+  it("has them beside the others, with the manifest's own Id and version, and says for whom", () => {
+    const share = "\\\\plant\\add-ins";
+    const { folder } = makePackage({ address, offline: false, openPane: { share } }, sources);
+    const text = (file: string) => readFileSync(join(folder, file), "utf8");
+    const manifest = text("manifest.xml");
+    const files = readdirSync(join(folder, "samples/with-pane"));
+    expect(files).toEqual(readdirSync(join(folder, "samples")).filter((file) => file.endsWith(".xlsx")));
+    for (const file of files) {
+      const [opening, plain] = [`samples/with-pane/${file}`, `samples/${file}`].map((path) =>
+        unzipSync(readFileSync(join(folder, path))),
+      );
+      const reference = Buffer.from(opening!["xl/webextensions/webextension1.xml"]!).toString();
+      const [, id, version] = /<we:reference id="([^"]+)" version="([^"]+)"/.exec(reference)!;
+      expect(manifest).toContain(`<Id>${id}</Id>`);
+      expect(manifest).toContain(`<Version>${version}</Version>`);
+      expect(reference).toContain(`store="${share}" storeType="FileSystem"`);
+      expect(opening!["xl/worksheets/sheet2.xml"]).toEqual(plain!["xl/worksheets/sheet2.xml"]);
+      expect(Object.keys(plain!)).not.toContain("xl/webextensions/webextension1.xml");
+    }
+    expect(text("HOSTING.txt")).toContain(`the shared folder ${share}`);
+  });
+
+  it("refers to the administrator's catalogue by its name", () => {
+    expect(paneReference(readFileSync("manifest.xml", "utf8"), "central")).toEqual({
+      id: FIXED_ID,
+      version: `${version}.0`,
+      storeType: "EXCatalog",
+      store: "EXCatalog",
+    });
   });
 });
 

@@ -49,4 +49,30 @@ describe("what npm run package is told", () => {
     });
     expect(readPackageOptions(["--adress", "x"])).toEqual({ refused: expect.stringContaining("not known") });
   });
+
+  it.each([
+    ["central", "central"],
+    ["\\\\plant-1\\add-ins", { share: "\\\\plant-1\\add-ins" }],
+    ["\\\\10.0.0.5\\share\\Beadline 1", { share: "\\\\10.0.0.5\\share\\Beadline 1" }],
+  ])("makes samples that open the pane for an add-in from %s", (from, openPane) => {
+    const words = ["--address", "https://tools.example/a", "--open-pane", from];
+    expect(readPackageOptions(words)).toMatchObject({ openPane });
+    expect(readPackageOptions([...words.slice(0, 2), `--open-pane=${from}`])).toMatchObject({ openPane });
+  });
+
+  it.each([
+    "",
+    "Central",
+    "store",
+    "C:\\add-ins",
+    "\\\\plant",
+    "\\\\plant\\",
+    "//plant/add-ins",
+    '\\\\plant\\a"b',
+    "https://x.example",
+  ])("refuses to make them for an add-in from “%s”", (from) => {
+    expect(readPackageOptions(["--address", "https://tools.example/a", "--open-pane", from])).toEqual({
+      refused: expect.stringContaining("is no place that Excel has add-ins from"),
+    });
+  });
 });

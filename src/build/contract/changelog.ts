@@ -25,3 +25,12 @@ export function unannounced(changedIds: readonly string[], changelog: string, ve
 
 export const isUnreleased = (changelog: string, version: string): boolean =>
   new RegExp(`^## ${escaped(version)}\\b.*unreleased`, "m").test(changelog);
+
+/** The section on top is this version's, still open, and says something of its results, be it that none changed. */
+export const isReadyToClose = (changelog: string, version: string): boolean =>
+  isUnreleased(changelog.slice(Math.max(0, changelog.search(/^## /m))).split("\n", 1)[0]!, version) &&
+  resultsChanged(changelog, version).trim() !== "";
+
+/** With the day on which the version was released in place of "unreleased". */
+export const closed = (changelog: string, version: string, day: string): string =>
+  changelog.replace(new RegExp(`^(## ${escaped(version)}\\b.*)unreleased`, "m"), `$1${day}`);

@@ -1,5 +1,5 @@
 /** What a released version is held to: its metadata, and calls with their results, as they are frozen in a file. */
-import { WorksheetError } from "../../src/catalogue/functions-runtime";
+import { WorksheetError } from "../../catalogue/functions-runtime";
 
 export type Given = readonly (readonly (readonly (number | string | boolean)[])[] | null)[];
 /** Of an error only its code is part of the contract; its words may be made clearer. */

@@ -1,7 +1,7 @@
 /** The calls that a new record freezes: every documented example, and variations of it by a fixed seed. */
-import type { CatalogueFunction } from "../../src/catalogue/catalogue";
-import { type Constant, parseExample } from "../../src/catalogue/formula";
-import { stateFromSeed, xoshiro128 } from "../../src/core/numeric/xoshiro128";
+import type { CatalogueFunction } from "../../catalogue/catalogue";
+import { type Constant, parseExample } from "../../catalogue/formula";
+import { stateFromSeed, xoshiro128 } from "../../core/numeric/xoshiro128";
 import type { FrozenCall, Given } from "./record";
 
 type Call = Pick<FrozenCall, "id" | "given">;
