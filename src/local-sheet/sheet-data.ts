@@ -1,11 +1,7 @@
 import { CellValueType, type ICellData, type IWorksheetData } from "@univerjs/core";
 import type { CellRole, CellValue, FilledSheet, FormatName, PlannedCell } from "../sheets";
 import { type CellStyles, cellStyle, styleName } from "./cell-styles";
-
-const spareRows = 100;
-const leastColumns = 20;
-const spareColumns = 8;
-const mostRows = 1_048_576;
+import { sheetRoom } from "./sheet-room";
 
 export interface SheetData {
   sheet: Partial<IWorksheetData>;
@@ -57,8 +53,7 @@ export function toSheetData(id: string, sheet: FilledSheet): SheetData {
       id,
       name: sheet.name,
       cellData,
-      rowCount: Math.min(rows + spareRows, mostRows),
-      columnCount: Math.max(sheet.columns.length + spareColumns, leastColumns),
+      ...sheetRoom(rows, sheet.columns.length),
       defaultColumnWidth: 96,
       defaultRowHeight: 24,
       columnData: Object.fromEntries(sheet.columns.map((column, index) => [index, { w: column.width }])),

@@ -11,12 +11,7 @@ import {
   WrapStrategy,
 } from "@univerjs/core";
 import { type CellLook, isError, type StoredCell, type StoredSheet } from "../../workbooks";
-
-const spareRows = 100;
-const leastColumns = 20;
-const spareColumns = 8;
-const mostRows = 1_048_576;
-const mostColumns = 16_384;
+import { sheetRoom } from "../sheet-room";
 
 const alignments = {
   left: HorizontalAlign.LEFT,
@@ -69,8 +64,7 @@ function sheetData(
     id,
     name: sheet.name,
     cellData,
-    rowCount: Math.min(rows + spareRows, mostRows),
-    columnCount: Math.min(Math.max(columns + spareColumns, leastColumns), mostColumns),
+    ...sheetRoom(rows, columns),
     defaultColumnWidth: 96,
     defaultRowHeight: 24,
     columnData: Object.fromEntries(widths),
