@@ -18,6 +18,8 @@ import type { CellValue, FilledSheet, Workbook } from "./workbook";
 
 /** Columns before a selected one that stay in view: a result next to the readings it came from. */
 const columnsLeftInView = 4;
+/** And rows above it, so that it does not stand right under the frozen header. */
+const rowsAboveInView = 4;
 
 const selectionCommands: ReadonlySet<string> = new Set([
   SetSelectionsOperation.id,
@@ -85,7 +87,10 @@ export class GridWorkbook implements Workbook {
     const sheet = this.#sheetOf(found);
     this.#workbook().setActiveSheet(sheet);
     found.activate();
-    sheet.scrollToCell(found.getRow(), Math.max(0, found.getColumn() - columnsLeftInView));
+    sheet.scrollToCell(
+      Math.max(0, found.getRow() - rowsAboveInView),
+      Math.max(0, found.getColumn() - columnsLeftInView),
+    );
   }
 
   async addSheet(sheet: FilledSheet): Promise<string> {

@@ -5,9 +5,11 @@ import { showFormulaOfSpill } from "./formula-of-spill";
 import { loadBuiltFunctions, registerFunctions } from "./functions";
 import { createGrid, openWorkbook } from "./grid";
 import { GridWorkbook } from "./grid-workbook";
+import { keepKeys } from "./keep-keys";
 import { showMessages } from "./message-line";
 import { openLogs } from "./open-log";
 import { GridPaneWorkbook } from "./pane-workbook";
+import { PrintView } from "./print";
 import { resultFormats } from "./result-format";
 import { type Sample, sampleList, sampleSheets } from "./samples/list";
 import { SampleMenu } from "./samples/menu";
@@ -21,6 +23,7 @@ import "../taskpane/pane.css";
 import "./sheet.css";
 import "./csv/import-dialog.css";
 import "./samples/menu.css";
+import "./print/print.css";
 
 const element = (id: string) => document.getElementById(id)!;
 
@@ -48,8 +51,19 @@ async function start(): Promise<void> {
     menu.current = undefined;
     element("sample-name").textContent = name;
   });
-  openLogs(workbook, catalogue, element("sample-name"), (file) => files.open(file));
+  const logOpened = (name: string) => {
+    files.name = name;
+    element("sample-name").textContent = name;
+  };
+  openLogs(workbook, catalogue, logOpened, (file) => files.open(file));
   element("save").addEventListener("click", () => files.save());
+  const printView = new PrintView(element("print-view"), grid, {
+    source: () => element("sample-name").textContent ?? "",
+    version: catalogue.version,
+    drawn: () => pane.drawn(),
+    settle: () => work.isThere(),
+  });
+  element("print").addEventListener("click", () => void printView.open());
   const menu = new SampleMenu(element("samples") as HTMLDialogElement, samples, {
     hasOwnWork: () => work.isThere(),
     async open(sample) {
@@ -65,13 +79,6 @@ async function start(): Promise<void> {
   };
   tell(first);
   element("open-samples").addEventListener("click", () => menu.show());
-}
-
-/** Keys pressed in the pane are not meant for the grid, which listens on the whole page. */
-function keepKeys(pane: HTMLElement): void {
-  for (const kind of ["keydown", "keypress", "keyup", "paste", "copy", "cut"]) {
-    pane.addEventListener(kind, (event) => event.stopPropagation());
-  }
 }
 
 function toggleFunctions(button: HTMLElement, list: HTMLElement): void {

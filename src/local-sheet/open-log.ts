@@ -14,7 +14,7 @@ const slowBytes = 2_000_000;
 export function openLogs(
   workbook: Workbook,
   catalogue: Catalogue,
-  sampleName: HTMLElement,
+  onOpened: (name: string) => void,
   openWorkbook: (file: File) => Promise<void>,
 ): void {
   const input = document.getElementById("log-file") as HTMLInputElement;
@@ -22,9 +22,7 @@ export function openLogs(
     document.getElementById("import") as HTMLDialogElement,
     workbook,
     catalogue,
-    (name) => {
-      sampleName.textContent = name;
-    },
+    onOpened,
   );
   const open = async (file: File | undefined) => {
     if (!file) return;

@@ -23,6 +23,7 @@ import type {
 } from "../taskpane/workbook/workbook";
 import type { Grid } from "./grid";
 import type { GridWorkbook } from "./grid-workbook";
+import { reachOf } from "./reach";
 import { SpilledResults } from "./spilled-results";
 
 const FIRST_FEW = 5;
@@ -108,9 +109,8 @@ export class GridPaneWorkbook implements Workbook {
   }
 
   async getUsedRange(address: string): Promise<string | undefined> {
-    const { sheet } = this.#place(address);
-    const all = sheet.getDataRange();
-    const used: Block = { row: 0, column: 0, lastRow: all.getLastRow(), lastColumn: all.getLastColumn() };
+    const { sheet, range } = this.#place(address);
+    const used = reachOf(sheet, this.#spilled(range));
     const values = await this.getValues(addressOn(sheet.getSheetName(), blockName(used)));
     let [lastRow, lastColumn] = [-1, -1];
     values.forEach((row, r) => {

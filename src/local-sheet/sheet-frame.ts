@@ -5,7 +5,7 @@ import { LAST_COLUMN, LAST_ROW } from "./address";
 const leastRows = 5000;
 const spareRows = 500;
 const leastColumns = 52;
-const spareColumns = 20;
+const spareColumns = 26;
 
 export interface Filled {
   readonly rows: number;

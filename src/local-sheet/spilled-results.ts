@@ -22,16 +22,21 @@ export class SpilledResults {
   callerOf({ sheetId, row, column }: CellPosition): Caller | undefined {
     const own = this.#formulaAt(sheetId, row, column);
     if (own) return { sheetId, row, column, formula: own };
-    const rectangles = this.#model.getArrayFormulaRange()[this.#unitId]?.[sheetId] ?? {};
-    for (const columns of Object.values(rectangles)) {
-      for (const area of Object.values((columns ?? {}) as Record<number, IRange>)) {
-        if (!area || row < area.startRow || row > area.endRow) continue;
-        if (column < area.startColumn || column > area.endColumn) continue;
-        const formula = this.#formulaAt(sheetId, area.startRow, area.startColumn);
-        if (formula) return { sheetId, row: area.startRow, column: area.startColumn, formula };
-      }
+    for (const area of this.areas(sheetId)) {
+      if (row < area.startRow || row > area.endRow) continue;
+      if (column < area.startColumn || column > area.endColumn) continue;
+      const formula = this.#formulaAt(sheetId, area.startRow, area.startColumn);
+      if (formula) return { sheetId, row: area.startRow, column: area.startColumn, formula };
     }
     return undefined;
+  }
+
+  /** Every rectangle of a sheet that a formula fills. */
+  *areas(sheetId: string): Generator<IRange> {
+    const rectangles = this.#model.getArrayFormulaRange()[this.#unitId]?.[sheetId] ?? {};
+    for (const columns of Object.values(rectangles)) {
+      for (const area of Object.values((columns ?? {}) as Record<number, IRange>)) if (area) yield area;
+    }
   }
 
   /** The rectangle that a cell's formula fills; undefined where it fills its own cell only. */

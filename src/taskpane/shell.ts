@@ -3,6 +3,7 @@ import { BuildView } from "./build/build-view";
 import { button, make } from "./dom";
 import { FindView } from "./find/find-view";
 import { FreezeView } from "./freeze/freeze-view";
+import type { DrawnFigure } from "./look/figure";
 import { LookView } from "./look/look-view";
 import { Pane } from "./pane";
 import { StartView } from "./start/start-view";
@@ -24,6 +25,8 @@ export interface MountedPane {
   readonly open: (view: ViewName) => Promise<void>;
   /** Tells the pane that another workbook is open now. */
   readonly forget: () => void;
+  /** The pictures that are drawn at the moment. */
+  readonly drawn: () => readonly DrawnFigure[];
 }
 
 /** The whole pane: five views under one row of buttons, and a foot that says what was done. */
@@ -34,6 +37,7 @@ export function mountPane(
 ): MountedPane {
   const pane = new Pane(sheetExpected);
   const build = new BuildView(catalogue, pane);
+  const look = new LookView(catalogue, pane);
   const finding = new Finding(catalogue, (found) => {
     build.start(found);
     void open("Formula").then(() => build.focus());
@@ -41,7 +45,7 @@ export function mountPane(
   const views: Readonly<Record<ViewName, View>> = {
     Find: finding,
     Formula: build,
-    Pictures: new LookView(catalogue, pane),
+    Pictures: look,
     Sheets: new StartView(catalogue, pane),
     Freeze: new FreezeView(catalogue, pane),
   };
@@ -70,7 +74,12 @@ export function mountPane(
     pane.foot,
   );
   void open("Find");
-  return { connect: (workbook) => pane.connect(workbook), open, forget: () => pane.forget() };
+  return {
+    connect: (workbook) => pane.connect(workbook),
+    open,
+    forget: () => pane.forget(),
+    drawn: () => look.drawn,
+  };
 }
 
 /** The list and the page of the function chosen from it: one after the other, or side by side where there is room. */

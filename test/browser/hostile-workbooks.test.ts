@@ -2,7 +2,7 @@
 import ExcelJS from "exceljs";
 import { afterAll, beforeAll, expect, it } from "vitest";
 import { formulas, handMade, partsOf, zipped } from "../workbooks/hand-made";
-import { savedFile } from "./setup/saved-file";
+import { saveAs } from "./setup/saved-file";
 import { closePage, openSheet, readValues, type WatchedPage, waitForValue } from "./setup/sheet-page";
 
 let sheet: WatchedPage;
@@ -57,7 +57,7 @@ it("formulas that are typed and reach outside ask nobody, and start nothing from
   await page.evaluate(() => window.beadlineSheet!.setFormula("S!A20", "=1+1"));
   await waitForValue(page, "S!A20", (value) => value === 2);
   expect(await page.locator("#grid a[href]").count()).toBe(0);
-  const { path } = await savedFile(page, "Save workbook");
+  const { path } = await saveAs(page, "Save workbook");
   const book = new ExcelJS.Workbook();
   await book.xlsx.readFile(path);
   const saved = book.worksheets[0]!;

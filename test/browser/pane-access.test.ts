@@ -1,10 +1,8 @@
-import axe from "axe-core";
+import type { Page } from "playwright-core";
 import { describe, expect, it } from "vitest";
+import { accessFaults } from "./setup/access";
 import { openPane, openSheetWithPane, openView, searchOf, select } from "./setup/pane";
 import { closePage, type PageOptions } from "./setup/sheet-page";
-
-/** Everything that WCAG 2.2 asks for up to AA and that a machine can check. */
-const RULES = ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"];
 
 const THEMES: readonly (readonly [string, PageOptions])[] = [
   ["light", { colorScheme: "light" }],
@@ -14,17 +12,7 @@ const THEMES: readonly (readonly [string, PageOptions])[] = [
 
 const VIEWS = ["Find", "Formula", "Pictures", "Sheets", "Freeze"];
 
-async function faultsOf(page: Parameters<typeof searchOf>[0]): Promise<string[]> {
-  // Run by the browser's own command: the page's policy lets no script in, and must not for a test.
-  await page.evaluate(axe.source);
-  return page.evaluate(async (tags) => {
-    const { axe: checker } = window as unknown as { axe: typeof axe };
-    const { violations } = await checker.run(".pane", { runOnly: tags });
-    return violations.flatMap(({ id, nodes }) =>
-      nodes.map(({ html, failureSummary }) => `${id}: ${html} ${failureSummary}`),
-    );
-  }, RULES);
-}
+const faultsOf = (page: Page) => accessFaults(page, ".pane");
 
 describe.each(THEMES)("the pane in %s", (_, theme) => {
   it.each([320, 480, 800])("has no fault of access in any view, %i px wide", async (width) => {

@@ -96,6 +96,31 @@ describe("freezing a record", () => {
     if (trace.startsWith("'Furnace")) expect((await readValues(page, trace)).flat().join("")).toBe("");
   });
 
+  it("puts the trace behind everything, a typed formula's results included", async () => {
+    const { page } = sheet;
+    await page.evaluate(async () => {
+      const name = "Typed";
+      await window.beadlineSheet!.addSheet({
+        name,
+        columns: [],
+        frozenRows: 0,
+        printOnePageWide: true,
+        cells: [],
+      });
+      await window.beadlineSheet!.setFormula("A1", '=BEAD.EMF({100;200},"K")');
+      await window.beadlineSheet!.setFormula("C1", '=BEAD.EMF({100,200,300,400},"K")');
+    });
+    await waitForValue(page, "Typed!F1", (value) => typeof value === "number");
+    const others = await readValues(page, "Typed!C1:F2");
+    await select(page, "Typed!A1");
+    await openView(page, "Freeze");
+    await page.getByRole("radio", { name: "beside the results" }).check();
+    await page.getByRole("button", { name: "Freeze these results" }).click();
+    await expect.poll(() => said(page)).toContain("in H1:I");
+    expect(await readValues(page, "Typed!C1:F2")).toEqual(others);
+    expect((await readValues(page, "Typed!H1"))[0]![0]).toBe("Frozen result");
+  });
+
   it("says what to do where nothing is to be frozen", async () => {
     const { page } = sheet;
     await select(page, "'Furnace log'!B8");

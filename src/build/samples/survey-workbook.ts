@@ -67,7 +67,7 @@ function summarySheet(): SheetPlan {
       { width: 160, format: "text" },
       { width: 92 },
       { width: 24 },
-      { width: 104, format: "text", role: "result" },
+      { width: 128, format: "text", role: "result" },
       ...FIGURE_WIDTHS.map((width) => ({ width, format: "degrees", role: "result" }) as const),
       { width: 72, format: "share", role: "result" },
       { width: 72, format: "count", role: "result" },

@@ -17,6 +17,9 @@ const READINGS = Array.from({ length: 45 }, (_, scan) => [
   }),
 ]);
 
+/** Of the table by sensor from its minimum on: as wide as their names need. */
+const FIGURE_WIDTHS = [88, 80, 88, 124, 132, 88, 72, 76, 100];
+
 const METRICS = [
   ["Verdict", "verdict", "general"],
   ["Survey from", "start", "date-time"],
@@ -43,11 +46,11 @@ export const surveySummary: Job = {
       "Survey",
       [
         { width: 152, format: "date-time" },
-        ...SENSORS.map(() => ({ width: 80, format: "temperature" }) as const),
-        { width: 24 },
-        { width: 232, format: "text", role: "result" },
+        ...SENSORS.map(() => ({ width: 60, format: "temperature" }) as const),
+        { width: 16 },
+        { width: 224, format: "text", role: "result" },
         { width: 152, format: "degrees", role: "result" },
-        ...Array.from({ length: 9 }, () => ({ width: 112, format: "degrees", role: "result" }) as const),
+        ...FIGURE_WIDTHS.map((width) => ({ width, format: "degrees", role: "result" }) as const),
       ],
       13,
     )

@@ -85,7 +85,7 @@ async function besideArea(workbook: Workbook, address: string, rows: number): Pr
 function traceSheet(trace: readonly [string, string][]): FilledSheet {
   return {
     name: "Frozen result",
-    columns: [{ width: 176 }, { width: 640 }],
+    columns: [{ width: 232 }, { width: 640 }],
     frozenRows: 1,
     printOnePageWide: true,
     cells: [

@@ -2,6 +2,7 @@ import type { Catalogue } from "../../catalogue/catalogue";
 import { readDraft } from "../build/draft";
 import { rangeOf } from "../formula/shape";
 import { findCall } from "../formula/syntax";
+import { localTime } from "../live/local-time";
 import { shownValue } from "../live/show-value";
 import { columnsOf, parseAddress, parseBlock, rowsOf } from "../workbook/address";
 import type { CellValue, FormulaCell } from "../workbook/workbook";
@@ -96,11 +97,3 @@ export function summary(values: readonly (readonly CellValue[])[], address: stri
 
 const shown = (value: CellValue, kind: string): string =>
   typeof value === "number" && (kind === "time" || kind === "date") ? shownValue(value, kind) : String(value);
-
-function localTime(date: Date): string {
-  const two = (value: number) => String(value).padStart(2, "0");
-  const day = `${date.getFullYear()}-${two(date.getMonth() + 1)}-${two(date.getDate())}`;
-  const minutes = -date.getTimezoneOffset();
-  const zone = `UTC${minutes < 0 ? "−" : "+"}${two(Math.floor(Math.abs(minutes) / 60))}:${two(Math.abs(minutes) % 60)}`;
-  return `${day} ${two(date.getHours())}:${two(date.getMinutes())} ${zone}`;
-}

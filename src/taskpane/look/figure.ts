@@ -35,3 +35,10 @@ export interface Band {
   readonly label: string;
   readonly role: Role;
 }
+
+/** A picture that is drawn in the pane, for those that show it elsewhere. */
+export interface DrawnFigure {
+  readonly figure: Figure;
+  /** Whether it shows the sheet's own readings rather than a published function. */
+  readonly ofSheet: boolean;
+}

@@ -3,6 +3,7 @@ import { freshId, make } from "../dom";
 import type { Pane } from "../pane";
 import { curves, type Quantity } from "./curves";
 import { DRAWN } from "./drawn-functions";
+import type { DrawnFigure } from "./figure";
 import { PictureCard } from "./picture-card";
 import { SurveyPart } from "./survey-part";
 
@@ -16,6 +17,7 @@ export class LookView {
   readonly #quantity: HTMLSelectElement;
   readonly #class: HTMLSelectElement;
   readonly #card: PictureCard;
+  readonly #survey: SurveyPart;
 
   constructor(catalogue: Catalogue, pane: Pane) {
     this.#card = new PictureCard(pane);
@@ -39,7 +41,7 @@ export class LookView {
     const draw = () => void pane.attempt(() => this.#draw());
     for (const control of [...this.#types, this.#quantity, this.#class])
       control.addEventListener("change", draw);
-    const survey = new SurveyPart(catalogue, pane);
+    this.#survey = new SurveyPart(catalogue, pane);
     this.element.append(
       make("h2", { tabindex: "-1" }, "Pictures"),
       make("h3", {}, "Reference functions"),
@@ -57,8 +59,17 @@ export class LookView {
         labelled("Tolerance class", this.#class),
       ),
       this.#card.element,
-      survey.element,
+      this.#survey.element,
     );
+  }
+
+  /** What is drawn, the survey first. */
+  get drawn(): readonly DrawnFigure[] {
+    const [survey, functions] = [this.#survey.figure, this.#card.figure];
+    return [
+      ...(survey ? [{ figure: survey, ofSheet: true }] : []),
+      ...(functions ? [{ figure: functions, ofSheet: false }] : []),
+    ];
   }
 
   async opened(): Promise<void> {

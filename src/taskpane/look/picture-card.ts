@@ -24,6 +24,11 @@ export class PictureCard {
     }
   }
 
+  /** What is to be seen here; undefined while nothing is drawn. */
+  get figure(): Figure | undefined {
+    return this.#figure;
+  }
+
   async show(figure: Figure, ...beneath: HTMLElement[]): Promise<void> {
     this.#figure = figure;
     this.element.hidden = false;

@@ -8,6 +8,7 @@ import { addressOn, blockName, cellName, columnName, parseAddress, parseBlock } 
 import { Trouble } from "../workbook/trouble";
 import type { Workbook } from "../workbook/workbook";
 import { SURVEY_ARGUMENTS } from "./drawn-functions";
+import type { Figure } from "./figure";
 import { PictureCard } from "./picture-card";
 import { type SensorLine, surveyFigure } from "./survey";
 
@@ -80,7 +81,18 @@ export class SurveyPart {
       this.#card.element,
     );
     this.#whole.addEventListener("change", () => void pane.attempt(() => this.#draw()));
+    pane.onForget(() => this.#forget());
     this.element.hidden = !pane.canReach;
+  }
+
+  get figure(): Figure | undefined {
+    return this.#card.figure;
+  }
+
+  /** Its cells were those of a workbook that is no longer open. */
+  #forget(): void {
+    this.#card.hide();
+    for (const field of Object.values(this.#fields)) field.value = "";
   }
 
   async #pick(name: Argument): Promise<void> {
