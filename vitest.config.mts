@@ -23,6 +23,8 @@ export default defineConfig({
           include: ["test/browser/**/*.test.ts"],
           globalSetup: ["test/browser/setup/global-setup.ts"],
           maxWorkers: 1,
+          // Under memory pressure the browser's own protocol loses an answer now and then ("promise was collected").
+          retry: 1,
           testTimeout: 60_000,
           hookTimeout: 60_000,
           sequence: { groupOrder: 1 },

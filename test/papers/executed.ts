@@ -11,7 +11,9 @@ export interface Place {
 
 const ci = (as: string): Place => ({ file: ".ci/run", as });
 
-const packaged = ci("npm run package -- --address https://your.host/beadline");
+/** With one option more: each further build takes CI half a minute. */
+const packaged = ci("npm run package -- --address https://your.host/beadline --offline");
+const served = ci('npx tsx test/papers/serves.ts "npm start -- --port 5700"');
 const quickBench = ci("npm run bench -- --quick");
 const releaseTest: Place = { file: "test/build/release/release.test.ts", as: 'describe("npm run release"' };
 const dryRun = ci("npm run mutation -- --dry-run junction");
@@ -21,8 +23,8 @@ export const ELSEWHERE: Readonly<Record<string, Place>> = {
   "npm test": ci("npm test -- --reporter=default"),
   "npm run build": { file: "package.json", as: '"test": "npm run build && ' },
   "npm run lint": ci("npm run lint -- --colors=off"),
-  "npm start": ci('npx tsx test/papers/serves.ts "npm start"'),
-  "npm start -- --port 5700": ci('npx tsx test/papers/serves.ts "npm start -- --port 5700"'),
+  "npm start": served,
+  "npm start -- --port 5700": served,
   "npm run pictures": { file: "test/browser/pictures.test.ts", as: "`npm run pictures -- " },
   "npm run bench": quickBench,
   "npm run bench -- Screen": quickBench,
@@ -31,6 +33,7 @@ export const ELSEWHERE: Readonly<Record<string, Place>> = {
   "npm run mutation -- survey log": dryRun,
   "npm run mutation -- --dry-run numeric": dryRun,
   "npm run package": packaged,
+  "npm run package -- --address https://your.host/beadline": packaged,
   "npm run package -- --address https://…": packaged,
   "npm run package -- --address https://host/path": packaged,
   // In a copy of the project: it would change this one.
