@@ -1,5 +1,5 @@
 /**
- * `npx tsx test/papers/serves.ts "npm start"`: runs a command that serves the local sheet, opens what it says it serves,
+ * `npx tsx test/papers/serves.ts "npm start -- --port 5700"`: runs a command that serves the local sheet, opens what it says it serves,
  * ends it as Ctrl-C does, and fails unless all of this went well.
  */
 import { spawn } from "node:child_process";
