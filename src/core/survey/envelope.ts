@@ -34,8 +34,8 @@ export function envelope(
     for (let scan = 0; scan < scans; scan++) {
       const temperature = (column[scan] as number) + correction;
       if (Number.isNaN(temperature)) continue;
-      if (temperature < (lowest[scan] as number)) lowest[scan] = temperature;
-      if (temperature > (highest[scan] as number)) highest[scan] = temperature;
+      lowest[scan] = Math.min(lowest[scan] as number, temperature);
+      highest[scan] = Math.max(highest[scan] as number, temperature);
       sum[scan]! += temperature;
       count[scan]!++;
     }

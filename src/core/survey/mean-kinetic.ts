@@ -35,7 +35,7 @@ export function meanKinetic(activationEnergy = ACTIVATION_ENERGY): MeanKinetic |
       if (temperature <= -ZERO_CELSIUS) {
         return noAnswer`reading ${degrees(temperature)} in row ${row + 1} is not above absolute zero`;
       }
-      if ((weights[row] as number) > 0 && temperature > highest) highest = temperature;
+      if ((weights[row] as number) > 0) highest = Math.max(highest, temperature);
     }
     if (highest === Number.NEGATIVE_INFINITY) {
       return grid === undefined ? noAnswer`no reading` : noAnswer`no two successive readings`;

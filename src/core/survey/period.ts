@@ -26,11 +26,12 @@ export function surveyPeriod(
   const { times } = block.grid;
   if (start !== undefined && end !== undefined && start > end) return noAnswer`start lies after end`;
   // Times of date-time cells carry a rounding error: a bound that is a scan's own time must hold that scan.
+  const from = (start ?? Number.NEGATIVE_INFINITY) - TIME_RESOLUTION;
+  const to = (end ?? Number.POSITIVE_INFINITY) + TIME_RESOLUTION;
   let first = 0;
-  while (start !== undefined && first < times.length && (times[first] as number) < start - TIME_RESOLUTION)
-    first++;
+  while ((times[first] as number) < from) first++;
   let last = times.length - 1;
-  while (end !== undefined && last >= 0 && (times[last] as number) > end + TIME_RESOLUTION) last--;
+  while ((times[last] as number) > to) last--;
   if (first > last) return noAnswer`the log has no scan between start and end`;
   const ragged =
     (start !== undefined && raggedStart(block.grid, first, start)) ||
