@@ -4,6 +4,7 @@
  * IEC 60751: R = R0 (1 + A t + B t² + C (t − 100 °C) t³), with C = 0 from 0 °C up.
  */
 import { degrees, measured, noAnswer, type Refusal, wrongKind } from "../errors";
+import { finite } from "../numeric/finite";
 import { platinum } from "./iec-60751";
 
 const { a, b, c, from, to } = platinum;
@@ -29,15 +30,15 @@ const notPositive = (r0: number): Refusal =>
 
 /**
  * Resistance in Ω of a platinum sensor at `t` °C, −200 to 850 °C; `r0` is its resistance
- * at 0 °C, Ω. Refuses a temperature outside that range and an r0 not above 0. IEC 60751.
+ * at 0 °C, Ω. Refuses a temperature outside that range, an r0 not above 0 and a resistance
+ * too large for a number. IEC 60751.
  */
 export function platinumResistance(t: number, r0: number): number | Refusal {
   if (!(r0 > 0)) return notPositive(r0);
   if (!(t >= from - AT_THE_END && t <= to + AT_THE_END)) {
     return noAnswer`temperature ${degrees(t)} is outside the range of platinum sensors, ${degrees(from)} to ${degrees(to)}`;
   }
-  const resistance = r0 * (1 + excess(t));
-  return Number.isFinite(resistance) ? resistance : notPositive(r0);
+  return finite(r0 * (1 + excess(t)), "resistance");
 }
 
 /**
@@ -61,10 +62,10 @@ export function platinumTemperature(resistance: number, r0: number): number | Re
 /** Newton's method; the curve bends one way only below 0 °C, so that it runs straight home. */
 function belowZero(x: number): number {
   let t = x / a;
-  for (let i = 0; i < 20; i++) {
-    const step = (x - excess(t)) / slope(t);
+  let step: number;
+  do {
+    step = (x - excess(t)) / slope(t);
     t += step;
-    if (Math.abs(step) <= CONVERGED) break;
-  }
+  } while (Math.abs(step) > CONVERGED);
   return t;
 }
