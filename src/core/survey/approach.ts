@@ -23,10 +23,10 @@ const SOME_NOT_BELOW = 2;
 export function overshoots(block: SurveyBlock, first: number, last: number): Float64Array {
   const { sensors, band } = block;
   const found = new Float64Array(sensors.length);
-  const after = lastAllBelow(block, first, last);
-  if (after === undefined || heldAbove(block, after + 1, first)) return found;
+  const from = firstOnTheWay(block, first, last);
+  if (heldAbove(block, from, first)) return found;
   sensors.forEach((column, sensor) => {
-    for (let scan = after + 1; scan < first; scan++) {
+    for (let scan = from; scan < first; scan++) {
       const deviation = (column[scan] as number) - band.setpoint;
       if (deviation > (found[sensor] as number)) found[sensor] = deviation;
     }
@@ -34,8 +34,8 @@ export function overshoots(block: SurveyBlock, first: number, last: number): Flo
   return found;
 }
 
-/** The last scan before the period with every sensor below the band. */
-function lastAllBelow({ sensors, band }: SurveyBlock, first: number, last: number): number | undefined {
+/** The scan after the last one before the period with every sensor below the band; `first` where there is no such. */
+function firstOnTheWay({ sensors, band }: SurveyBlock, first: number, last: number): number {
   const way = new Uint8Array(first);
   for (const column of sensors) {
     if (column.subarray(first, last + 1).every(Number.isNaN)) continue;
@@ -48,8 +48,8 @@ function lastAllBelow({ sensors, band }: SurveyBlock, first: number, last: numbe
       else if (present) way[scan]! |= SOME_BELOW;
     }
   }
-  const scan = way.lastIndexOf(SOME_BELOW);
-  return scan < 0 ? undefined : scan;
+  const allBelow = way.lastIndexOf(SOME_BELOW);
+  return allBelow < 0 ? first : allBelow + 1;
 }
 
 /** Whether from ≤ scan < to the load was held at a higher set point. */

@@ -20,7 +20,7 @@ export function envelope(
   const scans = readings[0]?.length;
   if (scans === undefined) return noAnswer`there is no sensor`;
   const odd = readings.findIndex((column) => column.length !== scans);
-  if (odd >= 0)
+  if (odd !== -1)
     return wrongKind`sensor ${odd + 1} has ${readings[odd]!.length} readings, sensor 1 has ${scans}`;
   if (corrections !== undefined && corrections.length !== readings.length) {
     return wrongKind`${corrections.length} corrections for ${readings.length} sensors`;

@@ -54,7 +54,7 @@ export function lethality(settings: LethalitySettings): LethalityOf | Refusal {
     const running = new Float64Array(times.length);
     let f = 0;
     let missingMinutes = 0;
-    let intervals = 0;
+    let known = false;
     for (let scan = 1; scan < times.length; scan++) {
       const from = temperatures[scan - 1] as number;
       const to = temperatures[scan] as number;
@@ -62,7 +62,7 @@ export function lethality(settings: LethalitySettings): LethalityOf | Refusal {
       if (gap[scan] === 1 || Number.isNaN(from + to)) {
         missingMinutes += minutes;
       } else {
-        intervals++;
+        known = true;
         f += minutes * interval(exponent(from), exponent(to), height(from), height(to));
         if (!Number.isFinite(f)) {
           const hotter = to > from ? scan : scan - 1;
@@ -71,7 +71,7 @@ export function lethality(settings: LethalitySettings): LethalityOf | Refusal {
       }
       running[scan] = f;
     }
-    if (intervals === 0) return noAnswer`no two successive readings`;
+    if (!known) return noAnswer`no two successive readings`;
     return { f, running, missingMinutes: roundedMinutes(missingMinutes) };
   };
 }

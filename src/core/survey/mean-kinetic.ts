@@ -57,15 +57,17 @@ export function meanKinetic(activationEnergy = ACTIVATION_ENERGY): MeanKinetic |
 const equalWeights = (temperatures: Float64Array): Float64Array =>
   temperatures.map((temperature) => (Number.isNaN(temperature) ? 0 : 1));
 
-/** Half of each interval that is known goes to the reading at either end: the trapezoid rule for the rate. */
+/**
+ * Each interval that is known goes to the reading at either end: the trapezoid rule for the rate. Half of it would be
+ * the reading's own time, but only the ratios of weights count.
+ */
 function timeWeights({ elapsed, gap }: TimeGrid, temperatures: Float64Array): Float64Array {
   const weights = new Float64Array(temperatures.length);
   for (let row = 1; row < temperatures.length; row++) {
     if (gap[row] === 1 || Number.isNaN((temperatures[row - 1] as number) + (temperatures[row] as number)))
       continue;
-    const half = (elapsed[row] as number) / 2;
-    weights[row - 1]! += half;
-    weights[row]! += half;
+    weights[row - 1]! += elapsed[row] as number;
+    weights[row]! += elapsed[row] as number;
   }
   return weights;
 }

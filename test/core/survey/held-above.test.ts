@@ -77,6 +77,13 @@ describe("a stay above the band", () => {
     expect(overshootOf(held(beginning, hold(5, 950, 948), hold(5, 960, 948)))).toBe(60);
   });
 
+  it("ends where the period begins", () => {
+    // The eleventh scan at 950 °C is the first of the period.
+    const rows = [...ramp(20, 890, 5, 0, 0), ...hold(11, 950, 948), ...hold(20, 900, 900)];
+    const found = survey(question(rows, { start: 2 * 15, end: 2 * 35 }));
+    expect(surveySummary(given(found)).overshoot).toBe(50);
+  });
+
   it("does not count before the load was last below the band", () => {
     const rows = held(hold(11, 950, 948));
     expect(overshootOf([...rows, ...ramp(880, 890, 2, 0, 0), [908, 907]])).toBe(8);

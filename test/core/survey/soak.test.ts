@@ -146,6 +146,7 @@ describe("a log without a soak", () => {
     );
     expect(reason(rows, { corrections: [1] })).toBe("#VALUE! 1 corrections for 2 sensors");
     expect(reason(rows, { corrections: [1, Number.NaN] })).toBe("#VALUE! correction of sensor 2 is missing");
+    expect(reason(rows, { corrections: [Number.NaN, 1] })).toBe("#VALUE! correction of sensor 1 is missing");
     expect(reason(rows, { times: Float64Array.of(0, 1, 2) })).toBe(
       "#VALUE! sensor 1 has 2 readings for 3 times",
     );

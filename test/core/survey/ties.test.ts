@@ -68,6 +68,13 @@ describe("the drift", () => {
     expect(summary(rows, { start: 0, end: 2 }).drift).toBeCloseTo(30, 9);
   });
 
+  it("keeps its digits where times are minutes since 1900, as date-time cells give them", () => {
+    const rows = Array.from({ length: 31 }, (_, i) => [900 + i / 30, 895 + i / 30]);
+    const log = question(rows);
+    const times = log.times.map((time) => 46083 * 1440 + time);
+    expect(surveySummary(given(survey({ ...log, times }))).drift).toBeCloseTo(1, 10);
+  });
+
   it("passes over a sensor without readings", () => {
     const rows = Array.from({ length: 31 }, (_, i) => [undefined, 900 + i / 30]);
     expect(summary(rows, { start: 0, end: 60 }).drift).toBeCloseTo(1, 9);
