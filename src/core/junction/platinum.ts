@@ -18,7 +18,8 @@ const CONVERGED = 1e-12;
 /** R/R0 − 1 at t °C: what is left of the sensor's change keeps all its digits near 0 °C. */
 const excess = (t: number): number => t * (a + t * (b + (t < 0 ? c * t * (t - 100) : 0)));
 
-const slope = (t: number): number => a + t * (2 * b + (t < 0 ? c * t * (4 * t - 300) : 0));
+/** d(R/R0)/dt below 0 °C, per °C. */
+const slopeBelowZero = (t: number): number => a + t * (2 * b + c * t * (4 * t - 300));
 
 const lowestExcess = excess(from);
 const highestExcess = excess(to);
@@ -53,7 +54,7 @@ export function platinumTemperature(resistance: number, r0: number): number | Re
     // The smaller root of the quadratic, in the form that does not cancel.
     const t = (2 * x) / (a + Math.sqrt(a * a + 4 * b * x));
     if (t <= to + AT_THE_END) return Math.min(t, to);
-  } else if (x >= lowestExcess - AT_THE_END * slope(from)) {
+  } else if (x >= lowestExcess - AT_THE_END * slopeBelowZero(from)) {
     return Math.max(belowZero(x), from);
   }
   return noAnswer`resistance ${measured(resistance, "Ω")} is outside the range of a platinum sensor with ${measured(r0, "Ω")} at 0 °C, ${measured(r0 * (1 + lowestExcess), "Ω")} (${degrees(from)}) to ${measured(r0 * (1 + highestExcess), "Ω")} (${degrees(to)})`;
@@ -64,7 +65,7 @@ function belowZero(x: number): number {
   let t = x / a;
   let step: number;
   do {
-    step = (x - excess(t)) / slope(t);
+    step = (x - excess(t)) / slopeBelowZero(t);
     t += step;
   } while (Math.abs(step) > CONVERGED);
   return t;

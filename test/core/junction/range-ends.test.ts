@@ -18,6 +18,8 @@ describe("a platinum sensor", () => {
   it("has a resistance up to 1E-9 °C beyond an end, and none further", () => {
     expect(platinumResistance(-200 - 0.9e-9, 100)).toBeCloseTo(printed(-200), 7);
     expect(platinumResistance(850 + 0.9e-9, 100)).toBeCloseTo(printed(850), 7);
+    expect(platinumResistance(-200 - 1e-9, 100)).toBeCloseTo(printed(-200), 7);
+    expect(platinumResistance(850 + 1e-9, 100)).toBeCloseTo(printed(850), 7);
     const outside = /^temperature .* is outside the range of platinum sensors, -200 °C to 850 °C$/;
     expect(message(platinumResistance(-200 - 1.1e-9, 100))).toMatch(outside);
     expect(message(platinumResistance(850 + 1.1e-9, 100))).toMatch(outside);
@@ -90,9 +92,11 @@ describe("a thermistor", () => {
     const sensor = believed(1e8, 8000);
     const t = (resistance: number): number => 1 / (1 / 298.15 + Math.log(resistance / 1e8) / 8000) - 273.15;
     expect(sensor.temperature(0.99e12)).toBeCloseTo(t(0.99e12), 9);
+    expect(sensor.temperature(1e12)).toBeCloseTo(t(1e12), 9);
     expect(sensor.temperature(1.01e12)).toBeInstanceOf(Refusal);
     const low = believed(1, 8000);
     expect(low.temperature(0.00101)).toBeCloseTo(1 / (1 / 298.15 + Math.log(0.00101) / 8000) - 273.15, 9);
+    expect(low.temperature(0.001)).toBeCloseTo(1 / (1 / 298.15 + Math.log(0.001) / 8000) - 273.15, 9);
     expect(low.temperature(0.00099)).toBeInstanceOf(Refusal);
   });
 
