@@ -129,6 +129,13 @@ describe("lethality", () => {
   it("counts a reading at the threshold", () => {
     expect(F(column(0, 10), column(121.1, 121.1), { threshold: 121.1 }).f).toBe(10);
     expect(F(column(0, 10), column(121.0, 121.0), { threshold: 121.1 }).f).toBe(0);
+    const method = "trapezoid";
+    expect(F(column(0, 10), column(121.1, 121.1), { threshold: 121.1, method }).f).toBe(10);
+    // Half a step of the ninth decimal is 5E-10 °C, and 2.8E-10 °C in a sheet in °F.
+    const unit = temperatureUnits.find(({ symbol }) => symbol === "F")!;
+    const below = column(121.1 - 4e-10, 121.1 - 4e-10);
+    expect(F(column(0, 10), below, { threshold: 121.1 }).f).toBeCloseTo(10, 6);
+    expect(F(column(0, 10), below, { threshold: 121.1, unit }).f).toBe(0);
   });
 
   it("counts the minutes of gaps and of missing readings instead of filling them", () => {
