@@ -63,8 +63,9 @@ describe("a simulation", () => {
       { uOther: 0.1 },
       { trials: 1001 },
       { seed: 2 },
-      { emf: 2, reference: 5 },
-      { emf: 25, reference: 0 },
+      // Written one after the other their numbers are the same.
+      { emf: 2, reference: 25 },
+      { emf: 22, reference: 5 },
     ];
     const found = asked.map((more) => simulated(more));
     // Each again, with the others in between: the same numbers, worked out anew.
@@ -109,7 +110,8 @@ describe("a simulation", () => {
     expect(message({ uEmfUv: 0, uReference: 0 })).toBe("every uncertainty is 0");
   });
 
-  it("counts the trials beyond either end of the range", () => {
+  it("counts the trials beyond the range, which may be all of them", () => {
+    expect(message({ uEmfUv: 1e15 })).toBe("1000 of 1000 trials are outside the range of type K");
     // At the end itself, half of the trials lie beyond it: 500 ± 16.
     const beyond = (emf: number) =>
       Number(
@@ -177,6 +179,24 @@ describe("validation (JCGM 101:2008, 8)", () => {
         );
       }
     }
+  });
+
+  it("holds at δ itself, and does not tell where only the scatter passes it", () => {
+    // u = 1, so δ is 0.5; y = 1.96: the ends of the first order are 0 and 3.92, exactly.
+    const ends = (deepest: number, low: number, high: number, highest: number) =>
+      validation(
+        Float64Array.from({ length: 10_000 }, (_, i) =>
+          i < 249 ? deepest : i < 5000 ? low : i < 9750 ? high : highest,
+        ),
+        1.96,
+        1,
+      );
+    const [atLow, atHigh] = [-0.5, 2 * 1.96 - 0.5];
+    expect(ends(atLow, atLow, atHigh, atHigh)).toBe("yes");
+    expect(ends(-0.7, atLow, atHigh, atHigh)).toBeInstanceOf(Refusal);
+    expect(ends(atLow, atLow, 3.3, atHigh)).toBeInstanceOf(Refusal);
+    expect(ends(-0.7, -0.6, atHigh, atHigh)).toBe("no");
+    expect(ends(atLow, atLow, 3.3, 3.4)).toBe("no");
   });
 
   it("says no beyond δ and the scatter, at one end or at both", () => {
