@@ -4,6 +4,7 @@
  * IEC 60751: R = R0 (1 + A t + B t² + C (t − 100 °C) t³), with C = 0 from 0 °C up.
  */
 import { degrees, measured, noAnswer, type Refusal, wrongKind } from "../errors";
+import { finite } from "../numeric/finite";
 import { platinum } from "./iec-60751";
 
 const { a, b, c, from, to } = platinum;
@@ -17,7 +18,8 @@ const CONVERGED = 1e-12;
 /** R/R0 − 1 at t °C: what is left of the sensor's change keeps all its digits near 0 °C. */
 const excess = (t: number): number => t * (a + t * (b + (t < 0 ? c * t * (t - 100) : 0)));
 
-const slope = (t: number): number => a + t * (2 * b + (t < 0 ? c * t * (4 * t - 300) : 0));
+/** d(R/R0)/dt below 0 °C, per °C. */
+const slopeBelowZero = (t: number): number => a + t * (2 * b + c * t * (4 * t - 300));
 
 const lowestExcess = excess(from);
 const highestExcess = excess(to);
@@ -29,15 +31,15 @@ const notPositive = (r0: number): Refusal =>
 
 /**
  * Resistance in Ω of a platinum sensor at `t` °C, −200 to 850 °C; `r0` is its resistance
- * at 0 °C, Ω. Refuses a temperature outside that range and an r0 not above 0. IEC 60751.
+ * at 0 °C, Ω. Refuses a temperature outside that range, an r0 not above 0 and a resistance
+ * too large for a number. IEC 60751.
  */
 export function platinumResistance(t: number, r0: number): number | Refusal {
   if (!(r0 > 0)) return notPositive(r0);
   if (!(t >= from - AT_THE_END && t <= to + AT_THE_END)) {
     return noAnswer`temperature ${degrees(t)} is outside the range of platinum sensors, ${degrees(from)} to ${degrees(to)}`;
   }
-  const resistance = r0 * (1 + excess(t));
-  return Number.isFinite(resistance) ? resistance : notPositive(r0);
+  return finite(r0 * (1 + excess(t)), "resistance");
 }
 
 /**
@@ -52,7 +54,7 @@ export function platinumTemperature(resistance: number, r0: number): number | Re
     // The smaller root of the quadratic, in the form that does not cancel.
     const t = (2 * x) / (a + Math.sqrt(a * a + 4 * b * x));
     if (t <= to + AT_THE_END) return Math.min(t, to);
-  } else if (x >= lowestExcess - AT_THE_END * slope(from)) {
+  } else if (x >= lowestExcess - AT_THE_END * slopeBelowZero(from)) {
     return Math.max(belowZero(x), from);
   }
   return noAnswer`resistance ${measured(resistance, "Ω")} is outside the range of a platinum sensor with ${measured(r0, "Ω")} at 0 °C, ${measured(r0 * (1 + lowestExcess), "Ω")} (${degrees(from)}) to ${measured(r0 * (1 + highestExcess), "Ω")} (${degrees(to)})`;
@@ -61,10 +63,10 @@ export function platinumTemperature(resistance: number, r0: number): number | Re
 /** Newton's method; the curve bends one way only below 0 °C, so that it runs straight home. */
 function belowZero(x: number): number {
   let t = x / a;
-  for (let i = 0; i < 20; i++) {
-    const step = (x - excess(t)) / slope(t);
+  let step: number;
+  do {
+    step = (x - excess(t)) / slopeBelowZero(t);
     t += step;
-    if (Math.abs(step) <= CONVERGED) break;
-  }
+  } while (Math.abs(step) > CONVERGED);
   return t;
 }

@@ -51,8 +51,11 @@ export class Thermistor {
    * and one whose temperature would lie outside −100 to 350 °C or past a turn of the curve.
    */
   temperature(resistance: number): number | Refusal {
-    if (resistance === 0) return noAnswer`resistance is 0 or an empty cell`;
-    if (!(resistance > 0)) return noAnswer`resistance ${measured(resistance, "Ω")} is not above 0`;
+    if (!(resistance > 0)) {
+      return resistance === 0
+        ? noAnswer`resistance is 0 or an empty cell`
+        : noAnswer`resistance ${measured(resistance, "Ω")} is not above 0`;
+    }
     const log = Math.log(resistance);
     if (log >= this.fallsFrom && log <= this.fallsTo) {
       const t = 1 / this.reciprocal(log) - ZERO_CELSIUS;

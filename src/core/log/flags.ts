@@ -1,5 +1,6 @@
 /** A word for each reading of a raw log. */
 import { noAnswer, type Refusal, wrongKind } from "../errors";
+import { refusedSetting } from "../numeric/above-zero";
 import { exceeds, type RoundedLimit, roundedLimit } from "../numeric/rounded-limit";
 
 /** "" for a good reading. Where several apply, the first of this order: missing, over, under, spike, stuck, step. */
@@ -33,11 +34,8 @@ export type Flagger = (readings: Float64Array) => Flag[];
 export function flagger(limits: FlagLimits): Flagger | Refusal {
   const { low, high, maxStep, stuckCount, spikeWidth } = limits;
   if (!(low < high)) return noAnswer`low ${low} is not below high ${high}`;
-  if (maxStep !== undefined && !(maxStep > 0)) {
-    return maxStep === 0
-      ? wrongKind`max step: 0 or an empty cell`
-      : wrongKind`max step ${maxStep} is not above 0`;
-  }
+  const refused = maxStep === undefined ? undefined : refusedSetting(maxStep, "max step");
+  if (refused !== undefined) return refused;
   if (stuckCount !== undefined && !(Number.isInteger(stuckCount) && stuckCount >= 2)) {
     return wrongKind`stuck count ${stuckCount} is no whole number from 2 up`;
   }
@@ -73,7 +71,7 @@ function markJumps(readings: Float64Array, flags: Flag[], jump: RoundedLimit, wi
     exceeds(Math.abs((readings[to] as number) - (readings[from] as number)), jump);
   /** The first scan after `start`, no more than `width` on, whose reading is back at the level before it. */
   const comesBack = (start: number): number | undefined => {
-    for (let k = start + 1; k <= start + width && k < readings.length; k++) {
+    for (let k = start + 1; k <= start + width; k++) {
       if (usable(k) && !jumps(start - 1, k)) return k;
     }
     return undefined;
@@ -81,12 +79,8 @@ function markJumps(readings: Float64Array, flags: Flag[], jump: RoundedLimit, wi
   for (let i = 1; i < readings.length; i++) {
     if (!usable(i) || !usable(i - 1) || !jumps(i - 1, i)) continue;
     const back = comesBack(i);
-    if (back === undefined) {
-      flags[i] = "step";
-      continue;
-    }
-    for (let k = i; k < back; k++) if (usable(k)) flags[k] = "spike";
-    i = back; // the next change is taken from here
+    if (back === undefined) flags[i] = "step";
+    else for (let k = i; k < back; k++) if (usable(k)) flags[k] = "spike";
   }
 }
 

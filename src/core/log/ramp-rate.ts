@@ -1,7 +1,8 @@
 /** How fast a record rises, scan by scan. */
-import { measured, type Refusal, wrongKind } from "../errors";
+import type { Refusal } from "../errors";
+import { refusedSetting } from "../numeric/above-zero";
 import { runningSlope } from "../numeric/running-slope";
-import { lengthRefusal, medianInterval, TIME_RESOLUTION, type TimeGrid } from "./time-grid";
+import { inMinutes, lengthRefusal, medianInterval, TIME_RESOLUTION, type TimeGrid } from "./time-grid";
 
 /** The window spans so many median intervals, unless the caller says otherwise. */
 const WINDOW_INTERVALS = 5;
@@ -19,11 +20,10 @@ export function rampRate(
 ): Float64Array | Refusal {
   const wrongLength = lengthRefusal(grid.times, temperatures, "the record");
   if (wrongLength !== undefined) return wrongLength;
-  if (windowMinutes === 0) return wrongKind`window: 0 or an empty cell`;
-  if (windowMinutes !== undefined && !(windowMinutes > 0)) {
-    return wrongKind`window ${measured(windowMinutes, "min")} is not above 0`;
-  }
-  // In a record whose times never rise there is no interval, and no rate.
-  const window = windowMinutes ?? (WINDOW_INTERVALS * medianInterval(grid.times) || 0);
+  const refused =
+    windowMinutes === undefined ? undefined : refusedSetting(windowMinutes, "window", inMinutes);
+  if (refused !== undefined) return refused;
+  // In a record whose times never rise there is no interval (NaN), and no rate.
+  const window = windowMinutes ?? WINDOW_INTERVALS * medianInterval(grid.times);
   return runningSlope(grid.times, temperatures, window / 2 + TIME_RESOLUTION / 2);
 }

@@ -15,12 +15,13 @@ export function spreadRepeatedStamps(
     const row = rows[k] as number;
     return (times[row] as number) + (added[row] as number);
   };
-  const stamps = rows.filter((_, k) => k === 0 || repaired(k) !== repaired(k - 1)).length;
+  // Before the first row and after the last there is no stamp: NaN, which is unlike any other.
+  const stamps = rows.filter((_, k) => repaired(k) !== repaired(k - 1)).length;
   let start = 0;
   while (start < rows.length) {
     const stamp = repaired(start);
     let end = start + 1;
-    while (end < rows.length && repaired(end) === stamp) end++;
+    while (repaired(end) === stamp) end++;
     const toNext =
       end < rows.length
         ? (repaired(end) - stamp) / (end - start)

@@ -1,5 +1,6 @@
 /** The times of a log: rising, with the gaps in which nothing is known. */
-import { measured, noAnswer, type Refusal, wrongKind } from "../errors";
+import { measured, noAnswer, type Quantity, type Refusal, wrongKind } from "../errors";
+import { refusedSetting } from "../numeric/above-zero";
 import { medianInPlace } from "../numeric/median";
 
 /**
@@ -9,6 +10,9 @@ import { medianInPlace } from "../numeric/median";
 export const TIME_RESOLUTION = 1e-6;
 
 export const roundedMinutes = (minutes: number): number => Math.round(minutes * 1e6) / 1e6;
+
+/** A duration in a message. */
+export const inMinutes = (minutes: number): Quantity => measured(minutes, "min");
 
 /** Whether a duration is longer than another by more than the rounding of its times. */
 export const longer = (minutes: number, than: number): boolean => minutes - than > TIME_RESOLUTION / 2;
@@ -32,7 +36,7 @@ export interface TimeGrid {
  * that the logger rounds its clock.
  */
 export function medianInterval(times: Float64Array): number {
-  const intervals = new Float64Array(Math.max(times.length - 1, 0));
+  const intervals = new Float64Array(times.length);
   let count = 0;
   for (let i = 1; i < times.length; i++) {
     const interval = (times[i] as number) - (times[i - 1] as number);
@@ -47,10 +51,8 @@ export function medianInterval(times: Float64Array): number {
  */
 export function timeGrid(times: Float64Array, maxGap?: number): TimeGrid | Refusal {
   if (times.length === 0) return noAnswer`the log has no scan`;
-  if (maxGap === 0) return wrongKind`max gap: 0 or an empty cell`;
-  if (maxGap !== undefined && !(maxGap > 0)) {
-    return wrongKind`max gap ${measured(maxGap, "min")} is not above 0`;
-  }
+  const refused = maxGap === undefined ? undefined : refusedSetting(maxGap, "max gap", inMinutes);
+  if (refused !== undefined) return refused;
   const elapsed = new Float64Array(times.length);
   for (let i = 0; i < times.length; i++) {
     const time = times[i] as number;

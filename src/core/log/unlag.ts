@@ -1,5 +1,6 @@
 /** The lag of a sensor taken out of its record. */
-import { measured, type Refusal, wrongKind } from "../errors";
+import { measured, type Refusal } from "../errors";
+import { refusedSetting } from "../numeric/above-zero";
 import { rampRate } from "./ramp-rate";
 import type { TimeGrid } from "./time-grid";
 
@@ -16,8 +17,8 @@ export function unlag(
   timeConstant: number,
   windowMinutes?: number,
 ): Float64Array | Refusal {
-  if (timeConstant === 0) return wrongKind`time constant: 0 or an empty cell`;
-  if (!(timeConstant > 0)) return wrongKind`time constant ${measured(timeConstant, "s")} is not above 0`;
+  const refused = refusedSetting(timeConstant, "time constant", (seconds) => measured(seconds, "s"));
+  if (refused !== undefined) return refused;
   const rates = rampRate(grid, temperatures, windowMinutes);
   if (!(rates instanceof Float64Array)) return rates;
   const minutes = timeConstant / SECONDS_PER_MINUTE;

@@ -23,41 +23,38 @@ const SOME_NOT_BELOW = 2;
 export function overshoots(block: SurveyBlock, first: number, last: number): Float64Array {
   const { sensors, band } = block;
   const found = new Float64Array(sensors.length);
-  const after = lastAllBelow(block, first, last);
-  if (after === undefined) return found;
-  let highest = 0;
+  const from = firstOnTheWay(block, first, last);
+  if (heldAbove(block, from, first)) return found;
   sensors.forEach((column, sensor) => {
-    for (let scan = after + 1; scan < first; scan++) {
+    for (let scan = from; scan < first; scan++) {
       const deviation = (column[scan] as number) - band.setpoint;
       if (deviation > (found[sensor] as number)) found[sensor] = deviation;
     }
-    highest = Math.max(highest, found[sensor] as number);
   });
-  const clear = band.tolerance.above + CLEAR_BY_WIDTHS * band.width;
-  return highest > clear && heldAbove(block, after + 1, first, clear) ? found.fill(0) : found;
+  return found;
 }
 
-/** The last scan before the period with every sensor below the band. */
-function lastAllBelow({ sensors, band }: SurveyBlock, first: number, last: number): number | undefined {
+/** The scan after the last one before the period with every sensor below the band; `first` where there is no such. */
+function firstOnTheWay({ sensors, band }: SurveyBlock, first: number, last: number): number {
   const way = new Uint8Array(first);
   for (const column of sensors) {
     if (column.subarray(first, last + 1).every(Number.isNaN)) continue;
     let below = true;
     for (let scan = 0; scan < first; scan++) {
       const temperature = column[scan] as number;
-      if (!Number.isNaN(temperature)) {
-        below = band.side(temperature) < 0;
-        if (below) way[scan]! |= SOME_BELOW;
-      }
+      const present = !Number.isNaN(temperature);
+      if (present) below = band.side(temperature) < 0;
       if (!below) way[scan]! |= SOME_NOT_BELOW;
+      else if (present) way[scan]! |= SOME_BELOW;
     }
   }
-  const scan = way.lastIndexOf(SOME_BELOW);
-  return scan < 0 ? undefined : scan;
+  const allBelow = way.lastIndexOf(SOME_BELOW);
+  return allBelow < 0 ? first : allBelow + 1;
 }
 
-/** Whether from ≤ scan < to the load was held at a higher set point. `clear`: deviation above which it can be one. */
-function heldAbove({ sensors, band, grid }: SurveyBlock, from: number, to: number, clear: number): boolean {
+/** Whether from ≤ scan < to the load was held at a higher set point. */
+function heldAbove({ sensors, band, grid }: SurveyBlock, from: number, to: number): boolean {
+  const clear = band.tolerance.above + CLEAR_BY_WIDTHS * band.width;
   const anchors = new Float64Array(sensors.length);
   const steady = STEADY_WITHIN_WIDTHS * band.width;
   const allClear = (scan: number): boolean =>

@@ -20,7 +20,7 @@ export function envelope(
   const scans = readings[0]?.length;
   if (scans === undefined) return noAnswer`there is no sensor`;
   const odd = readings.findIndex((column) => column.length !== scans);
-  if (odd >= 0)
+  if (odd !== -1)
     return wrongKind`sensor ${odd + 1} has ${readings[odd]!.length} readings, sensor 1 has ${scans}`;
   if (corrections !== undefined && corrections.length !== readings.length) {
     return wrongKind`${corrections.length} corrections for ${readings.length} sensors`;
@@ -34,8 +34,8 @@ export function envelope(
     for (let scan = 0; scan < scans; scan++) {
       const temperature = (column[scan] as number) + correction;
       if (Number.isNaN(temperature)) continue;
-      if (temperature < (lowest[scan] as number)) lowest[scan] = temperature;
-      if (temperature > (highest[scan] as number)) highest[scan] = temperature;
+      lowest[scan] = Math.min(lowest[scan] as number, temperature);
+      highest[scan] = Math.max(highest[scan] as number, temperature);
       sum[scan]! += temperature;
       count[scan]!++;
     }

@@ -1,8 +1,10 @@
 /** F value: the minutes at a reference temperature that would kill as much as the process did. */
-import { degrees, degreesApart, noAnswer, type Refusal, wrongKind } from "../errors";
+import { degrees, degreesApart, noAnswer, type Refusal } from "../errors";
 import { lengthRefusal, roundedMinutes, type TimeGrid } from "../log/time-grid";
+import { refusedSetting } from "../numeric/above-zero";
 import { toNinthDecimal } from "../numeric/ninth-decimal";
 import { celsius, type TemperatureUnit } from "../units";
+import { shareAbove } from "./time-above";
 
 /** `straight`: the temperature runs straight between scans and its rate is integrated exactly; `trapezoid`: the rate does. */
 export type LethalityMethod = "straight" | "trapezoid";
@@ -39,21 +41,20 @@ export type LethalityOf = (grid: TimeGrid, temperatures: Float64Array) => Lethal
 export function lethality(settings: LethalitySettings): LethalityOf | Refusal {
   const { reference, z, method = "straight", unit = celsius } = settings;
   const threshold = settings.threshold ?? Number.NEGATIVE_INFINITY;
-  if (z === 0) return wrongKind`z: 0 or an empty cell`;
-  if (!(z > 0)) return wrongKind`z ${degreesApart(z)} is not above 0`;
+  const refused = refusedSetting(z, "z", degreesApart);
+  if (refused !== undefined) return refused;
   const interval = method === "straight" ? straight : trapezoid;
   /** ln L. */
   const exponent = (temperature: number): number => (Math.LN10 * (temperature - reference)) / z;
   /** Height above the threshold; a reading at it counts as above. */
-  const height = (temperature: number): number =>
-    threshold === Number.NEGATIVE_INFINITY ? 1 : toNinthDecimal((temperature - threshold) / unit.degree);
+  const height = (temperature: number): number => toNinthDecimal((temperature - threshold) / unit.degree);
   return ({ times, elapsed, gap }, temperatures) => {
     const wrongLength = lengthRefusal(times, temperatures, "the record");
     if (wrongLength !== undefined) return wrongLength;
     const running = new Float64Array(times.length);
     let f = 0;
     let missingMinutes = 0;
-    let intervals = 0;
+    let known = false;
     for (let scan = 1; scan < times.length; scan++) {
       const from = temperatures[scan - 1] as number;
       const to = temperatures[scan] as number;
@@ -61,7 +62,7 @@ export function lethality(settings: LethalitySettings): LethalityOf | Refusal {
       if (gap[scan] === 1 || Number.isNaN(from + to)) {
         missingMinutes += minutes;
       } else {
-        intervals++;
+        known = true;
         f += minutes * interval(exponent(from), exponent(to), height(from), height(to));
         if (!Number.isFinite(f)) {
           const hotter = to > from ? scan : scan - 1;
@@ -70,7 +71,7 @@ export function lethality(settings: LethalitySettings): LethalityOf | Refusal {
       }
       running[scan] = f;
     }
-    if (intervals === 0) return noAnswer`no two successive readings`;
+    if (!known) return noAnswer`no two successive readings`;
     return { f, running, missingMinutes: roundedMinutes(missingMinutes) };
   };
 }
@@ -82,10 +83,10 @@ const trapezoid: MeanRate = (a, b, heightA, heightB) =>
   ((heightA >= 0 ? Math.exp(a) : 0) + (heightB >= 0 ? Math.exp(b) : 0)) / 2;
 
 const straight: MeanRate = (a, b, heightA, heightB) => {
-  if (heightA >= 0 && heightB >= 0) return meanExponential(a, b);
-  if (heightA < 0 && heightB < 0) return 0;
+  const share = shareAbove(heightA, heightB);
+  if (share === 1) return meanExponential(a, b);
+  if (share === 0) return 0;
   // From the crossing to the higher end.
-  const share = Math.max(heightA, heightB) / Math.abs(heightB - heightA);
   const [higher, lower] = heightA > heightB ? [a, b] : [b, a];
   return share * meanExponential(higher, higher + share * (lower - higher));
 };

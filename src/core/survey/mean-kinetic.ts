@@ -35,7 +35,7 @@ export function meanKinetic(activationEnergy = ACTIVATION_ENERGY): MeanKinetic |
       if (temperature <= -ZERO_CELSIUS) {
         return noAnswer`reading ${degrees(temperature)} in row ${row + 1} is not above absolute zero`;
       }
-      if ((weights[row] as number) > 0 && temperature > highest) highest = temperature;
+      if ((weights[row] as number) > 0) highest = Math.max(highest, temperature);
     }
     if (highest === Number.NEGATIVE_INFINITY) {
       return grid === undefined ? noAnswer`no reading` : noAnswer`no two successive readings`;
@@ -57,15 +57,17 @@ export function meanKinetic(activationEnergy = ACTIVATION_ENERGY): MeanKinetic |
 const equalWeights = (temperatures: Float64Array): Float64Array =>
   temperatures.map((temperature) => (Number.isNaN(temperature) ? 0 : 1));
 
-/** Half of each interval that is known goes to the reading at either end: the trapezoid rule for the rate. */
+/**
+ * Each interval that is known goes to the reading at either end: the trapezoid rule for the rate. Half of it would be
+ * the reading's own time, but only the ratios of weights count.
+ */
 function timeWeights({ elapsed, gap }: TimeGrid, temperatures: Float64Array): Float64Array {
   const weights = new Float64Array(temperatures.length);
   for (let row = 1; row < temperatures.length; row++) {
     if (gap[row] === 1 || Number.isNaN((temperatures[row - 1] as number) + (temperatures[row] as number)))
       continue;
-    const half = (elapsed[row] as number) / 2;
-    weights[row - 1]! += half;
-    weights[row]! += half;
+    weights[row - 1]! += elapsed[row] as number;
+    weights[row]! += elapsed[row] as number;
   }
   return weights;
 }

@@ -24,17 +24,16 @@ export function surveyPeriod(
   end?: number,
 ): SurveyPeriod | Refusal {
   const { times } = block.grid;
-  if (start !== undefined && end !== undefined && start > end) return noAnswer`start lies after end`;
+  const from = start ?? Number.NEGATIVE_INFINITY;
+  const to = end ?? Number.POSITIVE_INFINITY;
+  if (from > to) return noAnswer`start lies after end`;
   // Times of date-time cells carry a rounding error: a bound that is a scan's own time must hold that scan.
   let first = 0;
-  while (start !== undefined && first < times.length && (times[first] as number) < start - TIME_RESOLUTION)
-    first++;
+  while ((times[first] as number) < from - TIME_RESOLUTION) first++;
   let last = times.length - 1;
-  while (end !== undefined && last >= 0 && (times[last] as number) > end + TIME_RESOLUTION) last--;
+  while ((times[last] as number) > to + TIME_RESOLUTION) last--;
   if (first > last) return noAnswer`the log has no scan between start and end`;
-  const ragged =
-    (start !== undefined && raggedStart(block.grid, first, start)) ||
-    (end !== undefined && raggedEnd(block.grid, last, end));
+  const ragged = raggedStart(block.grid, first, start) || raggedEnd(block.grid, last, end);
   if (start === undefined || end === undefined) {
     const firstIn = states.indexOf(ALL_IN_BAND, first);
     const lastIn = states.lastIndexOf(ALL_IN_BAND, last);
@@ -47,14 +46,21 @@ export function surveyPeriod(
   return { first, last, ragged };
 }
 
-/** Nothing is known from `start` to the first scan: the log begins too late, or a gap reaches into the period. */
-function raggedStart({ times, gap, maxGap }: TimeGrid, first: number, start: number): boolean {
+/**
+ * Nothing is known from `start` to the first scan: the log begins too late, or a gap reaches into the period. Left
+ * out, the start is the first scan itself.
+ */
+function raggedStart(
+  { times, gap, maxGap }: TimeGrid,
+  first: number,
+  start = times[first] as number,
+): boolean {
   const wait = (times[first] as number) - start;
   return longer(wait, 0) && (gap[first] === 1 || longer(wait, maxGap));
 }
 
 /** The same at the other side. */
-function raggedEnd({ times, gap, maxGap }: TimeGrid, last: number, end: number): boolean {
+function raggedEnd({ times, gap, maxGap }: TimeGrid, last: number, end = times[last] as number): boolean {
   const rest = end - (times[last] as number);
   return longer(rest, 0) && (gap[last + 1] === 1 || longer(rest, maxGap));
 }

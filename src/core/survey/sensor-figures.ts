@@ -7,7 +7,7 @@ export interface SensorFigures {
   readonly count: number;
   readonly missing: number;
   readonly outOfBand: number;
-  /** °C; meaningless while `count` is 0, as the scans are. */
+  /** °C; meaningless while `count` is 0, as everything below is. */
   readonly lowest: number;
   readonly lowestScan: number;
   readonly highest: number;
@@ -75,8 +75,8 @@ export function sensorFigures(
       highestScan = scan;
     }
     const place = scan - first;
-    if (temperature < (scanLowest[place] as number)) scanLowest[place] = temperature;
-    if (temperature > (scanHighest[place] as number)) scanHighest[place] = temperature;
+    scanLowest[place] = Math.min(scanLowest[place] as number, temperature);
+    scanHighest[place] = Math.max(scanHighest[place] as number, temperature);
   }
   return {
     count,
@@ -87,7 +87,7 @@ export function sensorFigures(
     highest,
     highestScan,
     mean: setpoint + sum / count,
-    timeProducts: count > 0 ? sumTimeDeviation - (sumTime * sum) / count : 0,
-    timeSquares: count > 0 ? sumTimeTime - (sumTime * sumTime) / count : 0,
+    timeProducts: sumTimeDeviation - (sumTime * sum) / count,
+    timeSquares: sumTimeTime - (sumTime * sumTime) / count,
   };
 }

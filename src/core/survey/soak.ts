@@ -50,7 +50,7 @@ function longestStretch(
   let first = 0;
   for (let scan = 0; scan < states.length; scan++) {
     if (states[scan] !== ALL_IN_BAND) continue;
-    if (scan === 0 || states[scan - 1] !== ALL_IN_BAND || gap[scan] === 1) first = scan;
+    if (states[scan - 1] !== ALL_IN_BAND || gap[scan] === 1) first = scan;
     const minutes = (times[scan] as number) - (times[first] as number);
     const most = best === undefined ? -1 : (times[best.last] as number) - (times[best.first] as number);
     if (best?.first === first || longer(minutes, most)) best = { first, last: scan };

@@ -103,7 +103,7 @@ function extreme(
   value: (sensor: SensorFigures) => number,
   scan: (sensor: SensorFigures) => number,
 ): number {
-  let best = -1;
+  let best = 0;
   let least = Number.POSITIVE_INFINITY;
   sensors.forEach((sensor, index) => {
     if (sensor.count === 0) return;
@@ -128,7 +128,8 @@ function drift(sensors: readonly SensorFigures[]): number | Refusal {
   let products = 0;
   let squares = 0;
   for (const { count, timeProducts, timeSquares } of sensors) {
-    if (count < 2) continue;
+    // Its mean is not a number; a single reading adds exactly 0 to both.
+    if (count === 0) continue;
     products += timeProducts;
     squares += timeSquares;
   }

@@ -1,6 +1,6 @@
 /** A prepared survey: everything that a summary or a table of sensors says, from two passes over the block. */
-import { measured, Refusal, wrongKind } from "../errors";
-import { longer, roundedMinutes } from "../log/time-grid";
+import { Refusal, wrongKind } from "../errors";
+import { inMinutes, longer, roundedMinutes } from "../log/time-grid";
 import { celsius, type TemperatureUnit } from "../units";
 import { overshoots } from "./approach";
 import { type SurveyBlock, type SurveyLog, surveyBlock } from "./block";
@@ -38,9 +38,11 @@ export interface Survey {
 /** Refused: what `surveyBlock` and `surveyPeriod` refuse, and required minutes that are not above 0. */
 export function survey(question: SurveyQuestion): Survey | Refusal {
   const { start, end, requiredMinutes = REQUIRED_MINUTES, unit = celsius } = question;
-  if (requiredMinutes === 0) return wrongKind`required minutes: 0 or an empty cell`;
-  if (!(requiredMinutes > 0))
-    return wrongKind`required minutes: ${measured(requiredMinutes, "min")} is not above 0`;
+  if (!(requiredMinutes > 0)) {
+    return requiredMinutes === 0
+      ? wrongKind`required minutes: 0 or an empty cell`
+      : wrongKind`required minutes: ${inMinutes(requiredMinutes)} is not above 0`;
+  }
   const block = surveyBlock(question);
   if (block instanceof Refusal) return block;
   const states = scanStates(block);

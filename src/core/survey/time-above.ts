@@ -36,7 +36,7 @@ export function timeAbove(
 
 /** Share of a straight line from one height to another that lies at or above 0. */
 export function shareAbove(from: number, to: number): number {
-  if (from >= 0 && to >= 0) return 1;
-  if (from <= 0 && to <= 0) return 0;
-  return Math.max(from, to) / Math.abs(to - from);
+  const low = Math.min(from, to);
+  const high = Math.max(from, to, 0);
+  return low >= 0 ? 1 : high / (high - low);
 }

@@ -1,5 +1,6 @@
 /** The band about a set point in which every reading of a survey must lie. */
-import { degreesApart, type Refusal, wrongKind } from "../errors";
+import { degreesApart, type Refusal } from "../errors";
+import { refusedSetting } from "../numeric/above-zero";
 import { exceeds, type RoundedLimit, roundedLimit } from "../numeric/rounded-limit";
 import { celsius, type TemperatureUnit } from "../units";
 
@@ -57,8 +58,8 @@ export function toleranceBand(
   unit: TemperatureUnit = celsius,
 ): ToleranceBand | Refusal {
   for (const side of [tolerance.below, tolerance.above]) {
-    if (side === 0) return wrongKind`tolerance: 0 or an empty cell`;
-    if (!(side > 0)) return wrongKind`tolerance ${degreesApart(side)} is not above 0`;
+    const refused = refusedSetting(side, "tolerance", degreesApart);
+    if (refused !== undefined) return refused;
   }
   return new ToleranceBand(setpoint, tolerance, unit);
 }

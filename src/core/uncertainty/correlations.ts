@@ -33,7 +33,7 @@ export function refusedCorrelations(
     }
   }
   const row = contradictingRow(matrix);
-  return row < 0
+  return row === -1
     ? undefined
     : noAnswer`correlations in row ${row + 1} contradict those above it: the matrix is not positive semi-definite`;
 }

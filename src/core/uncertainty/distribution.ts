@@ -29,7 +29,7 @@ const otherNames: Readonly<Record<string, Distribution>> = {
   arcsine: "u-shaped",
 };
 
-const plain = (text: string): string => text.toLowerCase().replace(/[\s-]+/g, "");
+const plain = (text: string): string => text.toLowerCase().replace(/[\s-]/g, "");
 
 const byName = new Map<string, Distribution>([
   ...distributions.map((name) => [plain(name), name] as const),

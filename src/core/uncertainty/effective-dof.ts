@@ -12,8 +12,7 @@ export function welchSatterthwaite(terms: readonly number[], dofs: readonly (num
   const combined = rootSumSquare(terms);
   let sum = 0;
   for (const [i, term] of terms.entries()) {
-    const dof = dofs[i] ?? INFINITE_DOF;
-    if (dof < INFINITE_DOF) sum += (term / combined) ** 4 / dof;
+    sum += (term / combined) ** 4 / (dofs[i] ?? INFINITE_DOF);
   }
   return Math.min(1 / sum, INFINITE_DOF);
 }

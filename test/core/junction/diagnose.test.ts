@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { Refusal, type Thermocouple, thermocouple } from "../../../src/core";
+import { letterDesignations, Refusal, type Thermocouple, thermocouple } from "../../../src/core";
 import { diagnose, type Explanation, leadError } from "../../../src/core/junction";
 
 const couple = (name: string): Thermocouple => thermocouple(name) as Thermocouple;
@@ -65,12 +65,40 @@ describe("diagnose", () => {
     }
   });
 
+  it("weighs every letter type as setting and as couple, and the extensions of their own alloys (IEC 60584-3)", () => {
+    const others = letterDesignations.filter((name) => name !== "K");
+    const withoutHead = [
+      "no fault",
+      "reference junction not compensated",
+      "reference junction compensated twice",
+      ...others.flatMap((name) => [`instrument set to type ${name}`, `couple is type ${name}`]),
+      "crossed at the terminals",
+    ];
+    const withHead = [
+      ...withoutHead,
+      "crossed at the head",
+      "extension crossed at both ends",
+      "copper from head to terminals",
+      ...["E", "J", "N", "T"].map((name) => `extension of type ${name}`),
+    ];
+    // At these temperatures each of them has a true temperature.
+    const faults = (head?: number) =>
+      (diagnose(100, 120, k, 30, head) as readonly Explanation[]).map(({ fault }) => fault).sort();
+    expect(faults()).toEqual(withoutHead.sort());
+    expect(faults(60)).toEqual(withHead.sort());
+  });
+
   it("serves couples that are no letter type", () => {
     expect(best(diagnose(500, 500, couple("Au/Pt"), 20)).fault).toBe("no fault");
   });
 
   it("refuses a reading that the couple cannot show", () => {
-    expect((diagnose(2000, 500, k, 25) as Refusal).message()).toContain("indicated temperature 2000 °C");
-    expect((diagnose(200, 500, k, 25, 9000) as Refusal).message()).toContain("head temperature 9000 °C");
+    const refused = (indicated: number, reference: number, head?: number) =>
+      (diagnose(indicated, 500, k, reference, head) as Refusal).message();
+    const outside = "is outside the range of type K, -270 °C to 1372 °C";
+    expect(refused(2000, 25)).toBe(`indicated temperature 2000 °C ${outside}`);
+    expect(refused(200, -300)).toBe(`reference temperature -300 °C ${outside}`);
+    expect(refused(200, -300, 20)).toBe(`reference temperature -300 °C ${outside}`);
+    expect(refused(200, 25, 9000)).toBe(`head temperature 9000 °C ${outside}`);
   });
 });

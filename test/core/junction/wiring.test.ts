@@ -81,8 +81,23 @@ describe("a differential couple", () => {
     expect(differential(0, t, 60, 1)).toBeCloseTo(0, 10);
   });
 
-  it.each([0, -1, 1.5])("of %d pairs is refused", (pairs) => {
-    expect((differential(1, couple("T"), 20, pairs) as Refusal).kind).toBe("wrong kind");
+  it.each([
+    [0, "pairs is 0 or an empty cell"],
+    [-1, "pairs is -1, not a whole number above 0"],
+    [1.5, "pairs is 1.5, not a whole number above 0"],
+  ])("of %d pairs is refused", (pairs, words) => {
+    const refused = differential(1, couple("T"), 20, pairs);
+    expect((refused as Refusal).kind).toBe("wrong kind");
+    expect(message(refused)).toBe(words);
+  });
+
+  it("says which temperature is out of range, and that no couple gives such an EMF", () => {
+    expect(message(differential(1, couple("T"), 500, 1))).toBe(
+      "base temperature 500 °C is outside the range of type T, -270 °C to 400 °C",
+    );
+    expect(message(differential(Number.POSITIVE_INFINITY, couple("T"), 20, 1))).toBe(
+      "EMF over 1.8E+308 mV is beyond any couple",
+    );
   });
 
   it("says which limit an EMF passes", () => {
@@ -113,6 +128,42 @@ describe("refusals", () => {
       "head temperature -5 °C is outside the range of type B",
     );
     expect(message(leadError(5000, k, "copper", 50, 20))).toContain("temperature 5000 °C");
+  });
+
+  it("name it in full, whichever of the temperatures it is", () => {
+    const ofK = "is outside the range of type K, -270 °C to 1372 °C";
+    expect(message(rereferenced(500, k, -300, 20))).toBe(`assumed reference temperature -300 °C ${ofK}`);
+    expect(message(rereferenced(500, k, 0, 2000))).toBe(`actual reference temperature 2000 °C ${ofK}`);
+    expect(message(retyped(2000, k, couple("T"), 20))).toBe(`indicated temperature 2000 °C ${ofK}`);
+    expect(message(retyped(20, k, couple("C"), 2000))).toBe(`reference temperature 2000 °C ${ofK}`);
+    expect(message(retyped(500, couple("C"), k, 2000))).toBe(`reference temperature 2000 °C ${ofK}`);
+    for (const crossing of ["terminals", "head", "both"] as const) {
+      expect(message(unreversed(2000, k, crossing, 20, 60))).toBe(`indicated temperature 2000 °C ${ofK}`);
+    }
+    expect(message(unreversed(20, k, "terminals", 2000))).toBe(`reference temperature 2000 °C ${ofK}`);
+    expect(message(unreversed(20, k, "both", 2000, 60))).toBe(`reference temperature 2000 °C ${ofK}`);
+    expect(message(unreversed(20, k, "both", 20, 2000))).toBe(`head temperature 2000 °C ${ofK}`);
+  });
+
+  it.each([
+    ["temperature", leadError],
+    ["indicated temperature", releaded],
+  ] as const)("of a run name the couple's %s, its head or its terminals, or the run's", (name, repair) => {
+    const ofK = "is outside the range of type K, -270 °C to 1372 °C";
+    const ofT = "is outside the range of type T, -270 °C to 400 °C";
+    const t = couple("T");
+    for (const lead of ["copper", t] as const) {
+      expect(message(repair(5000, k, lead, 50, 20))).toBe(`${name} 5000 °C ${ofK}`);
+    }
+    expect(message(repair(500, k, "copper", 2000, 20))).toBe(`head temperature 2000 °C ${ofK}`);
+    expect(message(repair(500, k, "copper", 50, -300))).toBe(`reference temperature -300 °C ${ofK}`);
+    expect(message(repair(500, k, t, 500, 20))).toBe(`head temperature 500 °C ${ofT}`);
+    expect(message(repair(500, k, t, 50, 450))).toBe(`reference temperature 450 °C ${ofT}`);
+  });
+
+  it("of a run say that no temperature gives the EMF", () => {
+    expect(message(leadError(1370, k, couple("E"), 200, 20))).toContain("above the limit of type K");
+    expect(message(releaded(-269, k, couple("E"), 200, 20))).toContain("below the limit of type K");
   });
 
   it("say that the repaired reading would lie beyond the couple", () => {

@@ -49,7 +49,9 @@ describe("the ramp rate", () => {
     expect(refusal(rampRate(grid(every(1, 3)), column(1, 2, 3), -2))).toBe(
       "#VALUE! window -2 min is not above 0",
     );
-    expect(refusal(rampRate(grid(every(1, 3)), column(1, 2)))).toMatch(/2 readings for 3 times/);
+    expect(refusal(rampRate(grid(every(1, 3)), column(1, 2)))).toBe(
+      "#VALUE! the record has 2 readings for 3 times",
+    );
   });
 });
 
@@ -77,10 +79,22 @@ describe("taking out the lag", () => {
       expect(Math.abs((result[i] as number) - 800)).toBeLessThan(780 * (1 / 40) ** 2);
   });
 
+  it("takes the window that the rate takes, and refuses what it refuses", () => {
+    const record = column(0, 0, 0, 0, 1, 0, 0, 0, 9);
+    const result = given(unlag(grid(every(1, 9)), record, 60, 4));
+    // The scan at index 6 sees those from 4 to 8.
+    expect(result[6]).toBeCloseTo((-2 * 1 + 2 * 9) / 10, 12);
+    expect(refusal(unlag(grid(every(1, 3)), column(1, 2), 60))).toBe(
+      "#VALUE! the record has 2 readings for 3 times",
+    );
+  });
+
   it("refuses a time constant that is none", () => {
     expect(refusal(unlag(grid(every(1, 3)), column(1, 2, 3), 0))).toBe(
       "#VALUE! time constant: 0 or an empty cell",
     );
-    expect(refusal(unlag(grid(every(1, 3)), column(1, 2, 3), -3))).toMatch(/-3 s is not above 0/);
+    expect(refusal(unlag(grid(every(1, 3)), column(1, 2, 3), -3))).toBe(
+      "#VALUE! time constant -3 s is not above 0",
+    );
   });
 });

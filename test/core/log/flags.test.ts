@@ -75,8 +75,81 @@ describe("flags", () => {
   it("refuse limits that say nothing", () => {
     expect(refusal(flagger({ low: 5, high: 5 }))).toBe("#N/A low 5 is not below high 5");
     expect(refusal(flagger({ low: 0, high: 1, maxStep: 0 }))).toBe("#VALUE! max step: 0 or an empty cell");
-    expect(refusal(flagger({ low: 0, high: 1, stuckCount: 1 }))).toMatch(/whole number from 2 up/);
-    expect(refusal(flagger({ low: 0, high: 1, maxStep: 1, spikeWidth: 1.5 }))).toMatch(/whole number/);
-    expect(refusal(flagger({ low: 0, high: 1, spikeWidth: 1 }))).toMatch(/needs a max step/);
+    expect(refusal(flagger({ low: 6, high: 5 }))).toBe("#N/A low 6 is not below high 5");
+    expect(refusal(flagger({ low: 0, high: 1, maxStep: -2 }))).toBe("#VALUE! max step -2 is not above 0");
+    for (const stuckCount of [1, 0, -3, 2.5]) {
+      expect(refusal(flagger({ low: 0, high: 1, stuckCount }))).toBe(
+        `#VALUE! stuck count ${stuckCount} is no whole number from 2 up`,
+      );
+    }
+    for (const spikeWidth of [0, -1, 1.5, 1001]) {
+      expect(refusal(flagger({ low: 0, high: 1, maxStep: 1, spikeWidth }))).toBe(
+        `#VALUE! spike width ${spikeWidth} is no whole number from 1 to 1000`,
+      );
+    }
+    expect(refusal(flagger({ low: 0, high: 1, spikeWidth: 1 }))).toBe(
+      "#VALUE! a spike width needs a max step, which says how far a spike jumps",
+    );
+  });
+
+  it("take the shortest stuck run and the widest spike that there can be", () => {
+    expect(flags(column(5, 5, 6), { stuckCount: 2 })).toEqual(["stuck", "stuck", ""]);
+    const wide = new Float64Array(1002).fill(900);
+    wide[0] = wide[1001] = 20;
+    const found = flags(wide, { maxStep: 5, spikeWidth: 1000 });
+    expect(found.filter((flag) => flag === "spike")).toHaveLength(1000);
+    expect([found[0], found[1001]]).toEqual(["", ""]);
+  });
+
+  it("find a stuck run at the end of the record, and one of the level after a step", () => {
+    expect(flags(column(4, 5, 5, 5), { stuckCount: 3 })).toEqual(["", "stuck", "stuck", "stuck"]);
+    expect(flags(column(4, 90, 90, 90), { stuckCount: 3, maxStep: 10 })).toEqual([
+      "",
+      "stuck",
+      "stuck",
+      "stuck",
+    ]);
+  });
+
+  it("call what is over, under or a spike so, though it be stuck", () => {
+    expect(flags(column(2000, 2000, 5), { stuckCount: 2 })).toEqual(["over", "over", ""]);
+    expect(flags(column(-5, -5, 5), { stuckCount: 2 })).toEqual(["under", "under", ""]);
+    expect(flags(column(20, 60, 60, 21), { stuckCount: 2, maxStep: 5, spikeWidth: 2 })).toEqual([
+      "",
+      "spike",
+      "spike",
+      "",
+    ]);
+  });
+
+  it("see a spike through a reading lost in its middle, which stays missing", () => {
+    expect(flags(column(20, 60, undefined, 20, 21), { maxStep: 5, spikeWidth: 2 })).toEqual([
+      "",
+      "spike",
+      "missing",
+      "",
+      "",
+    ]);
+    expect(flags(column(20, 60, undefined, 60), { maxStep: 5, spikeWidth: 2 })).toEqual([
+      "",
+      "step",
+      "missing",
+      "",
+    ]);
+  });
+
+  it("take the next change from the reading at which a spike came back, and from a step", () => {
+    expect(flags(column(20, 60, 21, 50, 50), { maxStep: 5, spikeWidth: 1 })).toEqual([
+      "",
+      "spike",
+      "",
+      "step",
+      "",
+    ]);
+    expect(flags(column(20, 60, 90, 91), { maxStep: 5 })).toEqual(["", "step", "step", ""]);
+  });
+
+  it("call a jump in the last scan a step: it has not come back", () => {
+    expect(flags(column(20, 21, 60), { maxStep: 5, spikeWidth: 3 })).toEqual(["", "", "step"]);
   });
 });

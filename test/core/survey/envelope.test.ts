@@ -16,6 +16,16 @@ describe("the envelope", () => {
     expect(found.spread).toEqual(column(11, 13, undefined));
   });
 
+  it("spans the readings as they are where there are no corrections", () => {
+    const found = given(envelope([column(900, undefined), column(905, 7)]));
+    expect(found).toEqual({
+      lowest: column(900, 7),
+      highest: column(905, 7),
+      mean: column(902.5, 7),
+      spread: column(5, 0),
+    });
+  });
+
   it("refuses columns and corrections that do not match", () => {
     expect(refusal(envelope([]))).toBe("#N/A there is no sensor");
     expect(refusal(envelope([column(1, 2), column(1)]))).toBe(
@@ -28,5 +38,9 @@ describe("the envelope", () => {
 describe("the system check", () => {
   it("takes the test reading with both its corrections from what the furnace shows", () => {
     expect(systemCheck(871.5, 869, 0.7, 0.3)).toBeCloseTo(1.5, 12);
+  });
+
+  it("refuses what is beyond all numbers", () => {
+    expect(refusal(systemCheck(1e308, -1e308, 0, 0))).toBe("#N/A the difference is too large for a number");
   });
 });

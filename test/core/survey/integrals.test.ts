@@ -38,6 +38,20 @@ describe("time above a temperature", () => {
     expect(Math.abs(minutes(times, temperatures, 121.3) - sum)).toBeLessThan(0.02);
   });
 
+  it("takes a reading within 1E-9 of the unit's degree of the threshold as at it", () => {
+    const fahrenheit = temperatureUnits.find(({ symbol }) => symbol === "F")!;
+    // Half a step of the ninth decimal is 5E-10 °C, and 2.8E-10 °C in a sheet in °F.
+    const below = column(121 - 4e-10, 121 - 4e-10);
+    expect(timeAbove(grid(column(0, 10)), below, 121)).toBe(10);
+    expect(timeAbove(grid(column(0, 10)), below, 121, fahrenheit)).toBe(0);
+  });
+
+  it("refuses a column of another length", () => {
+    expect(refusal(timeAbove(grid(column(0, 10)), column(1, 2, 3), 0))).toBe(
+      "#VALUE! the record has 3 readings for 2 times",
+    );
+  });
+
   it("is refused without two successive readings", () => {
     expect(refusal(timeAbove(grid(every(1, 3)), column(1, undefined, 1), 0))).toBe(
       "#N/A no two successive readings",
@@ -115,6 +129,13 @@ describe("lethality", () => {
   it("counts a reading at the threshold", () => {
     expect(F(column(0, 10), column(121.1, 121.1), { threshold: 121.1 }).f).toBe(10);
     expect(F(column(0, 10), column(121.0, 121.0), { threshold: 121.1 }).f).toBe(0);
+    const method = "trapezoid";
+    expect(F(column(0, 10), column(121.1, 121.1), { threshold: 121.1, method }).f).toBe(10);
+    // Half a step of the ninth decimal is 5E-10 °C, and 2.8E-10 °C in a sheet in °F.
+    const unit = temperatureUnits.find(({ symbol }) => symbol === "F")!;
+    const below = column(121.1 - 4e-10, 121.1 - 4e-10);
+    expect(F(column(0, 10), below, { threshold: 121.1 }).f).toBeCloseTo(10, 6);
+    expect(F(column(0, 10), below, { threshold: 121.1, unit }).f).toBe(0);
   });
 
   it("counts the minutes of gaps and of missing readings instead of filling them", () => {
@@ -143,6 +164,31 @@ describe("lethality", () => {
     const settings = given(lethality({ reference: 121.1, z: 10 }));
     expect(refusal(settings(grid(every(1, 3)), column(20, 99999, 20)))).toBe(
       "#N/A reading 99999 °C in row 2 is too far above the reference temperature",
+    );
+  });
+
+  it("names the earlier of two equal readings whose rate is beyond all numbers", () => {
+    const settings = given(lethality({ reference: 121.1, z: 10 }));
+    expect(refusal(settings(grid(every(1, 3)), column(20, 20, 99999)))).toMatch(/row 3/);
+    expect(refusal(settings(grid(every(1, 3)), column(99999, 20, 20)))).toMatch(/row 1/);
+    expect(refusal(settings(grid(every(1, 2)), column(99999, 99999)))).toMatch(/row 1/);
+  });
+
+  it("adds nothing for readings below the threshold, however hot, and none for a rate of 0", () => {
+    expect(F(column(0, 10), column(99999, 99999), { threshold: 1e6 }).f).toBe(0);
+    expect(F(column(0, 10), column(100, 100), { z: 1e-307 }).f).toBe(0);
+  });
+
+  it("counts a record that falls to the threshold and stays there", () => {
+    // Down from 131.1 to 121.1 in 10 minutes: 10 · (10 − 1)/ln 10; below, nothing.
+    const found = F(column(0, 10, 20), column(131.1, 121.1, 111.1), { threshold: 121.1 });
+    expect(found.f).toBeCloseTo((10 * 9) / Math.LN10, 9);
+  });
+
+  it("refuses a column of another length", () => {
+    const settings = given(lethality({ reference: 121.1, z: 10 }));
+    expect(refusal(settings(grid(every(1, 3)), column(121)))).toBe(
+      "#VALUE! the record has 1 readings for 3 times",
     );
   });
 
@@ -196,6 +242,15 @@ describe("mean kinetic temperature", () => {
     expect(found).toBeLessThan(30);
   });
 
+  it("weighs nothing across a gap", () => {
+    const found = mkt(column(20, 20, 20, 30, 30), undefined, column(0, 1, 2, 10, 11));
+    expect(found).toBeCloseTo(plain([20, 20, 20, 30, 30], [0.5, 1, 0.5, 0.5, 0.5]), 10);
+  });
+
+  it("is not led astray by a reading without weight, whatever it is", () => {
+    expect(mkt(column(-196, -196, undefined, 5000), 500, every(1, 4))).toBeCloseTo(-196, 9);
+  });
+
   it("leaves out missing readings, gaps, and a hot reading between two missing ones", () => {
     expect(mkt(column(20, undefined, 30))).toBe(mkt(column(20, 30)));
     expect(mkt(column(20, 20, undefined, 5000, undefined, 20, 20), 500, every(1, 7))).toBeCloseTo(20, 10);
@@ -211,6 +266,11 @@ describe("mean kinetic temperature", () => {
       "#VALUE! activation energy 9.9 kJ/mol is outside 10 to 500 kJ/mol",
     );
     expect(refusal(meanKinetic(501))).toMatch(/outside 10 to 500/);
+    expect(mkt(column(20), 10)).toBeCloseTo(20, 9);
+    expect(mkt(column(20), 500)).toBeCloseTo(20, 9);
+    expect(refusal(given(meanKinetic())(column(1, 2), grid(every(1, 3))))).toBe(
+      "#VALUE! the record has 2 readings for 3 times",
+    );
     expect(refusal(given(meanKinetic())(column(20, -273.15)))).toBe(
       "#N/A reading -273.15 °C in row 2 is not above absolute zero",
     );

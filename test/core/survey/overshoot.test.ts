@@ -86,4 +86,36 @@ describe("overshoot", () => {
     const found = summary(rows, { start: 64, end: 102 });
     expect(found).toMatchObject({ overshoot: 9, verdict: "Fail" });
   });
+
+  it("counts from the log's first scan, when that alone was below", () => {
+    expect(summary([[880, 880], [907, 890], ...soaked])).toMatchObject({ first: 2, overshoot: 7 });
+  });
+
+  it("is each sensor's own, above the set point", () => {
+    const rows = [...ramp(20, 890, 30, 0, 0), [904, 890], [902, 893], ...soaked];
+    expect([...given(survey(question(rows))).overshoots]).toEqual([4, 0]);
+  });
+
+  it("is seen although a sensor joins late, or begins in the band", () => {
+    const late = [[880, undefined], [907, undefined], [905, 890], ...soaked];
+    expect(summary(late)).toMatchObject({ first: 3, overshoot: 7 });
+    const hot = [[907, undefined], [905, 890], ...soaked];
+    expect(summary(hot)).toMatchObject({ first: 2, overshoot: 0 });
+  });
+
+  it("is none when the first known scan was above: a scan without readings says nothing", () => {
+    expect(summary([[undefined, undefined], [907, 910], ...soaked]).overshoot).toBe(0);
+  });
+
+  it("asks a sensor that reads in the period only once, and none that never does", () => {
+    const way = [...ramp(20, 890, 30, 0, 0), [890, 907], [890, 908]];
+    const last = [...hold(19, 901, 899).map(([a]) => [a, undefined]), [901, 899]];
+    // The second sensor is above while the first is still below: not all were below in these scans.
+    const period = { start: 64, end: 102 };
+    expect(summary([...way, ...last], period).overshoot).toBe(8);
+    const never = hold(20, 901, 899).map(([a]) => [a, undefined]);
+    expect(summary([...way, ...never], period).overshoot).toBe(0);
+    const after = [...never, [901, 899]];
+    expect(summary([...way, ...after], period).overshoot).toBe(0);
+  });
 });

@@ -49,6 +49,23 @@ describe("the soak", () => {
     expect(found(rows).interruptions).toBe(1);
   });
 
+  it("counts an excursion that ends in a single scan, the last of the log", () => {
+    expect(found([...hold(3, 900, 900), [910, 900], [900, 900]])).toMatchObject({
+      last: 2,
+      interruptions: 1,
+    });
+  });
+
+  it("ends with the last of several scans that share a stamp", () => {
+    const times = Float64Array.of(0, 2, 4, 4);
+    expect(given(soak(question(hold(4, 900), { times })))).toMatchObject({ first: 0, last: 3, minutes: 4 });
+  });
+
+  it("is the longer of two, wherever it stands", () => {
+    const rows = [...hold(3, 900), [950], ...hold(4, 900), [950], ...hold(3, 900)];
+    expect(found(rows)).toMatchObject({ first: 4, last: 7, minutes: 6, minutesToReach: 8, interruptions: 2 });
+  });
+
   it("takes a reading at the limit as in band, whatever its bits", () => {
     const rows = hold(3, 902.2, 897.8);
     expect(found(rows, { tolerance: { below: 2.2, above: 2.2 } }).minutes).toBe(4);
@@ -102,6 +119,15 @@ describe("a log without a soak", () => {
         [900, undefined],
       ]),
     ).toBe("#N/A no scan has every sensor in band; sensor 2 has no reading at all");
+    expect(reason([[undefined, 900]])).toBe(
+      "#N/A no scan has every sensor in band; sensor 1 has no reading at all",
+    );
+    expect(
+      reason([
+        [undefined, 900],
+        [880, undefined],
+      ]),
+    ).toBe("#N/A no scan has every sensor in band");
   });
 
   it("has every sensor in band for one scan: that is no soak", () => {
@@ -120,6 +146,7 @@ describe("a log without a soak", () => {
     );
     expect(reason(rows, { corrections: [1] })).toBe("#VALUE! 1 corrections for 2 sensors");
     expect(reason(rows, { corrections: [1, Number.NaN] })).toBe("#VALUE! correction of sensor 2 is missing");
+    expect(reason(rows, { corrections: [Number.NaN, 1] })).toBe("#VALUE! correction of sensor 1 is missing");
     expect(reason(rows, { times: Float64Array.of(0, 1, 2) })).toBe(
       "#VALUE! sensor 1 has 2 readings for 3 times",
     );

@@ -262,6 +262,20 @@ describe("a survey that cannot be made", () => {
   });
 });
 
+describe("the readings of a survey", () => {
+  it("are not copied where there is nothing to add", () => {
+    const log = question(furnace(), { corrections: [0, 1, 0, 0, 0] });
+    const { sensors } = given(survey(log)).block;
+    expect(sensors.map((column, s) => column === log.readings[s])).toEqual([true, false, true, true, true]);
+  });
+
+  it("leave the lowest and highest of each scan of the period, and of no other", () => {
+    const { extremes, period } = given(survey(question(furnace())));
+    expect(extremes.lowest).toHaveLength(period.last - period.first + 1);
+    expect(extremes.highest).toHaveLength(31);
+  });
+});
+
 describe("a period with one side from the caller", () => {
   it("finds the other in the band", () => {
     expect(summary(furnace(), { start: 80 })).toMatchObject({ first: 40, last: 60 });
