@@ -20,6 +20,46 @@ describe("xoshiro128**", () => {
   });
 });
 
+describe("a seeded state", () => {
+  it("is never all zeros, and differs in every word between neighbouring seeds", () => {
+    const words = Array.from({ length: 50 }, (_, seed) => stateFromSeed(seed));
+    for (let place = 0; place < 4; place++) {
+      expect(new Set(words.map((state) => state[place])).size).toBe(50);
+    }
+  });
+});
+
+describe("the polar method", () => {
+  /** Gives these uniform numbers of −1 … 1, each as two words of 32 bits. */
+  const bitsOf = (...uniforms: number[]): (() => number) => {
+    const words = uniforms.flatMap((u) => {
+      const whole = (u + 1) * 2 ** 52;
+      return [Math.floor(whole / 2 ** 21), (whole % 2 ** 21) * 2 ** 11];
+    });
+    return () => words.shift() as number;
+  };
+
+  it("makes two deviates of two uniform numbers: x·√(−2 ln s/s) and y·√(−2 ln s/s), s = x² + y²", () => {
+    const scale = Math.sqrt((-2 * Math.log(0.3125)) / 0.3125);
+    const deviate = normalDeviates(bitsOf(0.5, -0.25, 0.25, 0.5));
+    expect([deviate(), deviate(), deviate(), deviate()]).toEqual(
+      [0.5, -0.25, 0.25, 0.5].map((u) => u * scale),
+    );
+  });
+
+  it("throws away points outside the circle, on it, and at its centre", () => {
+    const scale = Math.sqrt((-2 * Math.log(0.3125)) / 0.3125);
+    const deviate = normalDeviates(bitsOf(0.75, 0.75, -1, 0, 0, 0, 0.5, 0.25));
+    expect([deviate(), deviate()]).toEqual([0.5 * scale, 0.25 * scale]);
+  });
+
+  it("uses all 53 bits of a uniform number", () => {
+    const least = 2 ** -52;
+    const square = least * least + 0.25;
+    expect(normalDeviates(bitsOf(least, 0.5))()).toBe(least * Math.sqrt((-2 * Math.log(square)) / square));
+  });
+});
+
 describe("normal deviates", () => {
   const count = 1_000_000;
   const deviate = normalDeviates(xoshiro128(stateFromSeed(12)));
