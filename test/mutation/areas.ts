@@ -26,7 +26,6 @@ export const areas: Readonly<Record<string, Area>> = {
       "test/core/thermoelectric/*.test.ts",
       "test/published/{emf-tables,inverse-approximations,conversions,scale-differences}.test.ts",
       "test/properties/thermoelectric.test.ts",
-      "test/functions/convert.test.ts",
     ],
   },
   junction: core("junction", [
