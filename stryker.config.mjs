@@ -8,7 +8,7 @@ export default {
   coverageAnalysis: "perTest",
   // What runs once, while a module loads, is data nearly everywhere: the published values hold it.
   ignoreStatic: true,
-  ignorePatterns: ["dist", "evidence", "samples", ".cache"],
+  ignorePatterns: ["dist", "test/evidence/pages", "samples", ".cache"],
   tempDirName: `.cache/stryker-${MUTATION_AREA}`,
   reporters: ["clear-text", "json", "progress-append-only"],
   jsonReporter: { fileName: `.cache/mutation/${MUTATION_AREA}.json` },

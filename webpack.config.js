@@ -47,8 +47,10 @@ const page = (name, template, policy) =>
   });
 
 /** Copies a folder flat; a folder that is generated later may still be absent. */
-const folder = (from, to) =>
-  existsSync(at(from)) ? [{ from: at(from), to: at("dist", to), noErrorOnMissing: true }] : [];
+const folder = (from, to, ignore = []) =>
+  existsSync(at(from))
+    ? [{ from: at(from), to: at("dist", to), noErrorOnMissing: true, globOptions: { ignore } }]
+    : [];
 
 /**
  * Writes down which files of which packages went into a bundle, into .cache/bundled/: `src/build/licences` reads what
@@ -152,7 +154,8 @@ const pages = {
         { from: at("src/taskpane/shortcuts.json"), to: at("dist/shortcuts.json") },
         { from: at("manifest.xml"), to: at("dist/manifest.xml"), noErrorOnMissing: true },
         ...folder("src/assets", "assets"),
-        ...folder("samples", "samples"),
+        // The pictures are the README's alone.
+        ...folder("samples", "samples", ["**/samples/pictures/**"]),
         ...folder("src/help", "."),
       ],
     }),

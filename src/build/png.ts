@@ -1,4 +1,4 @@
-// As much of the PNG format as the icons need: a list of chunks, each of length, name, content and checksum.
+// As much of the PNG format as the icons and the README's pictures need: a list of chunks, each of length, name, content and checksum.
 
 import { crc32 } from "node:zlib";
 
@@ -32,15 +32,19 @@ export function imageSize(png: Uint8Array): { width: number; height: number } {
   return { width: bytes.readUInt32BE(0), height: bytes.readUInt32BE(4) };
 }
 
-/** A chunk that holds a keyword and a text, ready to be put into a file. */
-export function textChunk(keyword: string, text: string): Buffer {
-  const named = Buffer.from(`tEXt${keyword}\0${text}`, "latin1");
+/** A chunk as it stands in a file. */
+export function framed({ name, content }: Chunk): Buffer {
+  const named = Buffer.concat([Buffer.from(name, "latin1"), content]);
   const chunk = Buffer.alloc(named.length + 8);
-  chunk.writeUInt32BE(named.length - 4, 0);
+  chunk.writeUInt32BE(content.length, 0);
   named.copy(chunk, 4);
   chunk.writeUInt32BE(crc32(named), named.length + 4);
   return chunk;
 }
+
+/** A chunk that holds a keyword and a text, ready to be put into a file. */
+export const textChunk = (keyword: string, text: string): Buffer =>
+  framed({ name: "tEXt", content: Buffer.from(`${keyword}\0${text}`, "latin1") });
 
 /** The text under a keyword, if the file has it. */
 export function textOf(png: Uint8Array, keyword: string): string | undefined {

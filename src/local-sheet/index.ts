@@ -1,6 +1,7 @@
 import { catalogue } from "../taskpane/catalogue";
 import { mountPane } from "../taskpane/shell";
 import { WorkbookFiles } from "./files";
+import { showFormulaOfSpill } from "./formula-of-spill";
 import { loadBuiltFunctions, registerFunctions } from "./functions";
 import { createGrid, openWorkbook } from "./grid";
 import { GridWorkbook } from "./grid-workbook";
@@ -35,6 +36,7 @@ async function start(): Promise<void> {
   const grid = createGrid(element("grid"), await sheetsOf(first));
   const messages = registerFunctions(grid.univer.__getInjector(), functions, resultFormats(catalogue));
   showFittingDigits(grid.univer.__getInjector());
+  showFormulaOfSpill(grid.univer.__getInjector());
   grid.api.getFormula().executeCalculation();
   const workbook = new GridWorkbook(grid, messages);
   Object.defineProperty(window, "beadlineSheet", { value: Object.freeze(workbook) });

@@ -1,5 +1,13 @@
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
-import { buildFormula, openSheetWithPane, openView, said, searchOf, select } from "./setup/pane";
+import {
+  buildFormula,
+  fillFromSelection,
+  openSheetWithPane,
+  openView,
+  said,
+  searchOf,
+  select,
+} from "./setup/pane";
 import { closePage, goToCell, readValues, type WatchedPage, waitForValue } from "./setup/sheet-page";
 
 let sheet: WatchedPage;
@@ -18,12 +26,10 @@ describe("the way from millivolts and terminal temperatures to a corrected colum
     await page.getByRole("button", { name: "Build this formula" }).click();
     // The first reading is selected in the grid; the rest of the column is one more press.
     await goToCell(page, "B8");
-    await page.getByRole("button", { name: "Use selection for emf" }).click();
-    await page.getByRole("button", { name: "Down to row 2007" }).click();
+    await fillFromSelection(page, "emf");
     await page.getByLabel(/^type/).selectOption("K");
     await goToCell(page, "F8");
-    await page.getByRole("button", { name: "Use selection for referenceTemperature" }).click();
-    await page.getByRole("button", { name: "Down to row 2007" }).click();
+    await fillFromSelection(page, "referenceTemperature");
     await expect.poll(place).toContain("Fills M8:M2007, 2000 × 1 cells; the space is free.");
     await page.getByRole("button", { name: "Insert formula" }).click();
     await waitForValue(page, "'Furnace log'!M2007", (value) => typeof value === "number");

@@ -1,44 +1,63 @@
-/** The evidence as one page without script: totals, plots, digits, and every value behind its source. */
+/** The evidence as one page without script. */
 import { createHash } from "node:crypto";
 import { readFileSync } from "node:fs";
 import { escaped } from "../../src/build/html";
 import type { Evidence } from "./collect";
-import { type Group, short } from "./group";
-import { residualPlot } from "./plot";
-import { findings, totals } from "./totals";
+import { introduction, sections } from "./page";
+import { bandPlot } from "./plots/band";
+import { digitsPlot } from "./plots/digits";
+import { residualPlot } from "./plots/residual";
+import { AGREES, type Column, type Section, type Table } from "./section";
+import { findings } from "./totals";
 
-/** Text, and numbers that stand right-aligned. */
-type Cell = string | { readonly figure: string | number };
+/** A number and its unit stay on one line. */
+const withUnit = (text: string): string => text.replace(/(?<=\d) (?=[°ΩµmV%])/g, "\u00a0");
 
-const cell = (content: Cell, tag: "td" | "th"): string =>
-  typeof content === "string"
-    ? `<${tag}>${escaped(content)}</${tag}>`
-    : `<${tag} class="figure">${escaped(String(content.figure))}</${tag}>`;
+/** Words between backticks are code; a number is not broken at its exponent. */
+const prose = (text: string): string =>
+  escaped(withUnit(text))
+    .replace(/`([^`]+)`/g, "<code>$1</code>")
+    .replace(/[\d.]+E-\d+/g, '<span class="number">$&</span>');
 
-const line = (cells: readonly Cell[], tag: "td" | "th"): string =>
-  `<tr>${cells.map((one) => cell(one, tag)).join("")}</tr>`;
+const marks = { text: "", figure: ' class="figure"', verdict: "" } as const;
 
-const table = (head: readonly Cell[], rows: readonly (readonly Cell[])[]): string =>
-  `<table>\n<thead>${line(head, "th")}</thead>\n<tbody>\n${rows.map((row) => line(row, "td")).join("\n")}\n</tbody>\n</table>`;
+function cell({ kind }: Column, content: string, link?: string): string {
+  const plain = escaped(withUnit(content));
+  const words = link === undefined ? plain : `<a href="#${link}">${plain}</a>`;
+  if (kind !== "verdict") return `<td${marks[kind]}>${words}</td>`;
+  return content === AGREES
+    ? `<td class="agrees">✓ ${words}</td>`
+    : `<td class="falls-short">✗ ${words}</td>`;
+}
 
-const figure = (content: string | number): Cell => ({ figure: content });
+function table({ columns, rows, links }: Table): string {
+  const head = columns.map(({ name, kind }) => `<th scope="col"${marks[kind]}>${escaped(name)}</th>`);
+  const body = rows.map((row, i) => {
+    const cells = row.map((content, j) =>
+      cell(columns[j] as Column, content, j === 0 ? links?.[i] : undefined),
+    );
+    return `<tr>${cells.join("")}</tr>`;
+  });
+  return `<div class="table">\n<table>\n<thead><tr>${head.join("")}</tr></thead>\n<tbody>\n${body.join("\n")}\n</tbody>\n</table>\n</div>`;
+}
 
-const verdict = (holds: boolean): string => (holds ? "✓ agrees" : "✗ FALLS SHORT");
+const plots = (evidence: Evidence): Readonly<Record<NonNullable<Section["plots"]>, readonly string[]>> => ({
+  residuals: evidence.residuals.map(residualPlot),
+  bands: evidence.bands.map(bandPlot),
+  digits: digitsPlot(evidence.certified),
+});
 
-const groupDetails = ({ source, compared, rows }: Group): string => `<details>
-<summary>${escaped(source)} (${rows.length})</summary>
-<p class="muted">${escaped(compared)}.</p>
-${table(
-  ["what", figure("published"), figure("ours"), figure("difference"), "verdict"],
-  rows.map((one) => [
-    one.what,
-    figure(one.published),
-    figure(one.ours),
-    figure(one.difference),
-    verdict(one.holds),
-  ]),
-)}
-</details>`;
+function section(
+  { id, level, title, text, table: rows, plots: kind }: Section,
+  drawn: ReturnType<typeof plots>,
+): string {
+  return [
+    `<h${level} id="${id}">${escaped(title)}</h${level}>`,
+    ...text.map((paragraph) => `<p class="muted">${prose(paragraph)}</p>`),
+    ...(kind === undefined ? [] : [`<div class="plots ${kind}">\n${drawn[kind].join("\n")}\n</div>`]),
+    ...(rows === undefined ? [] : [table(rows)]),
+  ].join("\n");
+}
 
 /** The page stands alone: the look of all pages, and what this one needs. */
 function styles(): string {
@@ -46,9 +65,9 @@ function styles(): string {
 }
 
 export function html(evidence: Evidence): string {
-  const { groups, residuals, certified } = evidence;
   const css = styles();
   const hash = createHash("sha256").update(css).digest("base64");
+  const drawn = plots(evidence);
   return `<!doctype html>
 <html lang="en">
 <head>
@@ -63,47 +82,13 @@ export function html(evidence: Evidence): string {
 <h1>Evidence</h1>
 <ul class="findings">
 ${findings(evidence)
-  .map((sentence) => `<li>${escaped(sentence)}</li>`)
+  .map((sentence) => `<li>${prose(sentence)}</li>`)
   .join("\n")}
 </ul>
-<p class="muted">“From memory” marks what was not found in print.</p>
-<h2>Totals by source</h2>
-${table(
-  ["source", figure("values"), figure("agree")],
-  totals(evidence).map(({ source, values, agreeing }) => [source, figure(values), figure(agreeing)]),
-)}
-<h2>The inverse over each couple's whole range</h2>
-<p class="muted">Residual of the inverse against an evaluation of the published function with 50 digits, on a logarithmic scale from 1E-15 to 1E-7 °C; the band is what we promise. Above it a couple hardly responds, and 5E-11 mV holds.</p>
-<div class="plots">
-${residuals.map(residualPlot).join("\n")}
-</div>
-${table(
-  [
-    "couple",
-    figure("from °C"),
-    figure("to °C"),
-    figure("inverse, °C"),
-    figure("inverse, mV"),
-    figure("E(t), mV"),
-    "verdict",
-  ],
-  residuals.map((one) => [
-    one.name,
-    figure(Number(one.low.toFixed(3))),
-    figure(one.high),
-    figure(short(one.worstDegrees)),
-    figure(short(one.worstMillivolts)),
-    figure(short(one.worstEmf)),
-    verdict(one.holds),
-  ]),
-)}
-<h2>NIST Statistical Reference Datasets</h2>
-${table(
-  ["set", "values", figure("digits that agree, of 15"), "verdict"],
-  certified.map(({ set, values, digits, holds }) => [set, values, figure(digits.toFixed(1)), verdict(holds)]),
-)}
-<h2>Every value</h2>
-${groups.map(groupDetails).join("\n")}
+${introduction.map((paragraph) => `<p class="muted">${prose(paragraph)}</p>`).join("\n")}
+${sections(evidence)
+  .map((one) => section(one, drawn))
+  .join("\n")}
 </main>
 </body>
 </html>

@@ -1,52 +1,33 @@
-/** The evidence as Markdown: totals first, every value after. */
+/** The evidence as Markdown. */
 import type { Evidence } from "./collect";
-import { type Group, short } from "./group";
-import { findings, totals } from "./totals";
+import { introduction, sections } from "./page";
+import type { Section, Table } from "./section";
+import { findings } from "./totals";
 
-const table = (head: readonly string[], rows: readonly (readonly (string | number)[])[]): string =>
-  [head, head.map(() => "---"), ...rows].map((cells) => `| ${cells.join(" | ")} |`).join("\n");
+const cell = (content: string): string => content.replaceAll("|", "\\|").replaceAll("*", "\\*");
 
-const verdict = (holds: boolean): string => (holds ? "agrees" : "FALLS SHORT");
+const line = (cells: readonly string[]): string => `| ${cells.map(cell).join(" | ")} |`;
 
-const groupTable = ({ source, compared, rows }: Group): string =>
-  `### ${source}\n\n${compared}.\n\n${table(
-    ["what", "published", "ours", "difference", "verdict"],
-    rows.map((one) => [one.what, one.published, one.ours, one.difference, verdict(one.holds)]),
-  )}`;
+const table = ({ columns, rows }: Table): string =>
+  [
+    line(columns.map(({ name }) => name)),
+    `| ${columns.map(({ kind }) => (kind === "figure" ? "---:" : "---")).join(" | ")} |`,
+    ...rows.map(line),
+  ].join("\n");
 
-export function markdown(evidence: Evidence): string {
-  const { groups, residuals, certified } = evidence;
-  return `${[
+const section = (one: Section): string[] => [
+  `${"#".repeat(one.level)} ${cell(one.title)}`,
+  ...one.text,
+  ...(one.plots === undefined ? [] : ["The plots stand in `evidence.html`."]),
+  ...(one.table === undefined ? [] : [table(one.table)]),
+];
+
+export const markdown = (evidence: Evidence): string =>
+  `${[
     "# Evidence",
-    'Made by `npm run evidence`; a test fails when a value falls short and when this page is stale. "From memory" marks what was not found in print.',
+    ...introduction,
     findings(evidence)
       .map((sentence) => `- ${sentence}`)
       .join("\n"),
-    "## Totals by source",
-    table(
-      ["source", "values", "agree"],
-      totals(evidence).map(({ source, values, agreeing }) => [source, values, agreeing]),
-    ),
-    "## The inverse over each couple's whole range",
-    "Largest residual at 401 temperatures against an evaluation of the published function with 50 digits. The plots stand in `evidence.html`.",
-    table(
-      ["couple", "from °C", "to °C", "inverse, °C", "inverse, mV", "E(t), mV", "verdict"],
-      residuals.map((one) => [
-        one.name,
-        Number(one.low.toFixed(3)),
-        one.high,
-        short(one.worstDegrees),
-        short(one.worstMillivolts),
-        short(one.worstEmf),
-        verdict(one.holds),
-      ]),
-    ),
-    "## NIST Statistical Reference Datasets",
-    table(
-      ["set", "values", "digits that agree, of 15", "verdict"],
-      certified.map(({ set, values, digits, holds }) => [set, values, digits.toFixed(1), verdict(holds)]),
-    ),
-    "## Every value",
-    ...groups.map(groupTable),
+    ...sections(evidence).flatMap(section),
   ].join("\n\n")}\n`;
-}

@@ -14,7 +14,7 @@ const core = (folder: string, tests: readonly string[]): Area => ({
 
 export const areas: Readonly<Record<string, Area>> = {
   numeric: core("numeric", [
-    "test/published/{strd-polynomials,strd-univariate,gum}.test.ts",
+    "test/published/{strd-polynomials,strd-univariate,gum,distributions}.test.ts",
     "test/core/calibration/deviation.test.ts",
     "test/core/uncertainty/{budget,evaluate}.test.ts",
   ]),
@@ -24,7 +24,7 @@ export const areas: Readonly<Record<string, Area>> = {
     tests: [
       "test/core/reference-functions.test.ts",
       "test/core/thermoelectric/*.test.ts",
-      "test/published/{emf-tables,inverse-approximations,conversions,scale-differences}.test.ts",
+      "test/published/{emf-tables,inverse-approximations,conversions,landmarks,scale-differences}.test.ts",
       "test/properties/thermoelectric.test.ts",
     ],
   },

@@ -2,8 +2,12 @@
  * Published EMF tables: type, temperature in °C, EMF in mV as printed (reference junction
  * at 0 °C) and the decimals to which it is printed. Grouped under their source.
  */
+import { thermocouple } from "../../src/core";
+import type { Origin, PublishedSet } from "./published-value";
+
 export interface EmfTable {
   readonly source: string;
+  readonly origin: Origin;
   readonly rows: readonly (readonly [type: string, t: number, emf: number, decimals: number])[];
 }
 
@@ -11,6 +15,7 @@ export interface EmfTable {
 export const emfTables: readonly EmfTable[] = [
   {
     source: "NIST SRD 60 table (1 °C steps)",
+    origin: "print",
     rows: [
       ["E", -260, -9.797, 3],
       ["E", -250, -9.718, 3],
@@ -357,7 +362,8 @@ export const emfTables: readonly EmfTable[] = [
     ],
   },
   {
-    source: "emf table in 50 °C steps, national edition of IEC 60584",
+    source: "EMF table in 50 °C steps, a national edition of IEC 60584",
+    origin: "print",
     rows: [
       ["R", -50, -0.226, 3],
       ["R", 0, 0.0, 3],
@@ -429,6 +435,7 @@ export const emfTables: readonly EmfTable[] = [
   },
   {
     source: "NIST SRD 60, limits of the inverse ranges",
+    origin: "print",
     rows: [
       ["E", 0, 0.0, 3],
       ["J", 760, 42.919, 3],
@@ -443,6 +450,7 @@ export const emfTables: readonly EmfTable[] = [
   },
   {
     source: "GOST R 8.585-2001, limits of the inverse ranges",
+    origin: "print",
     rows: [
       ["A", 2500, 33.64, 3],
       ["Chromel/Copel", -200, -9.488, 3],
@@ -452,7 +460,8 @@ export const emfTables: readonly EmfTable[] = [
     ],
   },
   {
-    source: "NIST Monograph 175 / ASTM E230 table (from memory)",
+    source: "NIST Monograph 175 / ASTM E230 table",
+    origin: "memory",
     rows: [
       ["R", 1600, 18.849, 3],
       ["R", 1700, 20.222, 3],
@@ -469,7 +478,8 @@ export const emfTables: readonly EmfTable[] = [
     ],
   },
   {
-    source: "chromel / Au-0.07 at% Fe laboratory table",
+    source: "a laboratory table of chromel / Au-0.07 at% Fe",
+    origin: "print",
     rows: [
       ["NiCr/AuFe0.07", -263.15, -5.1818, 4],
       ["NiCr/AuFe0.07", -253.15, -5.014, 4],
@@ -480,3 +490,16 @@ export const emfTables: readonly EmfTable[] = [
     ],
   },
 ];
+
+export const emfSets: readonly PublishedSet[] = emfTables.map(({ source, origin, rows }) => ({
+  source,
+  origin,
+  compared: "EMF over temperature, reference junction at 0 °C",
+  values: rows.map(([type, t, published, decimals]) => ({
+    what: `${type} at ${t} °C`,
+    unit: "mV",
+    published,
+    decimals,
+    ours: () => thermocouple(type)?.emf(t),
+  })),
+}));

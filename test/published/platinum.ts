@@ -1,3 +1,6 @@
+import { platinumResistance } from "../../src/core/junction";
+import type { PublishedSet } from "./published-value";
+
 /**
  * IEC 60751:2008, table of resistance over temperature for R0 = 100 Ω, to 0.01 Ω; three
  * printed copies agree.
@@ -57,16 +60,31 @@ export const platinumTable: readonly (readonly [t: number, resistance: number])[
   [850, 390.48],
 ];
 
-/**
- * The table of the scale before, IPTS-68 (one page, found inconsistent elsewhere): what a
- * sensor must not be read by today.
- */
-// biome-ignore format: one row a line
-export const supersededPlatinumTable: readonly (readonly [t: number, resistance: number])[] = [
-  [100, 138.5],
-  [200, 175.84],
-  [400, 247.06],
-  [600, 313.65],
-  [-100, 60.2],
-  [-200, 18.53],
+export const platinumSets: readonly PublishedSet[] = [
+  {
+    source: "IEC 60751:2008, R0 = 100 Ω (three copies)",
+    origin: "print",
+    compared: "resistance over temperature",
+    values: platinumTable.map(([t, published]) => ({
+      what: `${t} °C`,
+      unit: "Ω",
+      published,
+      decimals: 2,
+      ours: () => platinumResistance(t, 100),
+    })),
+  },
+  {
+    source: "IEC 60751:2008, R(100 °C), whence α = 3.85055E-3 /°C",
+    origin: "memory",
+    compared: "resistance for R0 = 100 Ω",
+    values: [
+      {
+        what: "100 °C",
+        unit: "Ω",
+        published: 138.5055,
+        decimals: 4,
+        ours: () => platinumResistance(100, 100),
+      },
+    ],
+  },
 ];

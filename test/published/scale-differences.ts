@@ -1,9 +1,12 @@
+import { toIts90 } from "../../src/core";
+import type { PublishedSet } from "./published-value";
+
 /**
  * t90 − t68 over t90, °C, as printed to 1 mK in a handbook table; the fit of the
  * published polynomial to it is stated as 1.5 mK below 0 °C and 1 mK above.
  */
 // biome-ignore format: one row a line
-export const printedDifferences: readonly (readonly [t90: number, difference: number])[] = [
+const printedDifferences: readonly (readonly [t90: number, difference: number])[] = [
   [-180, 0.008],
   [-170, 0.01],
   [-160, 0.012],
@@ -52,8 +55,60 @@ export const printedDifferences: readonly (readonly [t90: number, difference: nu
 ];
 
 /** Printed values above the gold point, to 10 mK (a handbook). */
-export const printedRadiationDifferences: readonly (readonly [t90: number, difference: number])[] = [
+const printedRadiationDifferences: readonly (readonly [t90: number, difference: number])[] = [
   [1500, -0.44],
   [2000, -0.72],
   [2500, -1.07],
+];
+
+/** t90 − t68 where t90 is what the printed difference makes of it. */
+const differenceAt = (t90: number, printed: number): number => {
+  const t68 = t90 - printed;
+  const found = toIts90(t68);
+  return typeof found === "number" ? found - t68 : Number.NaN;
+};
+
+export const scaleSets: readonly PublishedSet[] = [
+  {
+    source: "ITS-90 less IPTS-68, a handbook's table",
+    origin: "print",
+    compared:
+      "t90 − t68: 1.5 mK below 0 °C and 1 mK above for the stated fit, 0.5 mK for the rounding of the table",
+    values: printedDifferences.map(([t90, published]) => ({
+      what: `${t90} °C`,
+      unit: "°C",
+      published,
+      decimals: 3,
+      tolerance: (t90 < 0 ? 0.0015 : 0.001) + 0.0005,
+      ours: () => differenceAt(t90, published),
+    })),
+  },
+  {
+    source: "ITS-90 less IPTS-68 above the gold point, a handbook",
+    origin: "print",
+    compared: "t90 − t68, printed to 10 mK: half of that, and 1 mK for the fit",
+    values: printedRadiationDifferences.map(([t90, published]) => ({
+      what: `${t90} °C`,
+      unit: "°C",
+      published,
+      decimals: 2,
+      tolerance: 0.006,
+      ours: () => differenceAt(t90, published),
+    })),
+  },
+  {
+    source: "definitions of IPTS-68 and ITS-90",
+    origin: "print",
+    compared: "the gold point of the one scale on the other",
+    values: [
+      {
+        what: "t68 = 1064.43 °C",
+        unit: "°C",
+        published: 1064.18,
+        decimals: 2,
+        tolerance: 0.0005,
+        ours: () => toIts90(1064.43),
+      },
+    ],
+  },
 ];

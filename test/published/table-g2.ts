@@ -1,13 +1,16 @@
+import { coverageFactor, INFINITE_DOF } from "../../src/core/uncertainty";
+import type { PublishedSet } from "./published-value";
+
 /**
  * JCGM 100:2008, Table G.2: t_p(ν) from Student's t distribution for the fractions p in percent.
  * Each value to three decimals, from an independent statistics library (SciPy); the print has
- * them to two. One printed cell, ν = 35 at 90 %, is reported as 1.70 where 1.690 is right.
+ * them to two.
  */
-export const fractions: readonly number[] = [68.27, 90, 95, 95.45, 99, 99.73];
+const fractions: readonly number[] = [68.27, 90, 95, 95.45, 99, 99.73];
 
 /** Infinite degrees of freedom are the last row. */
 // biome-ignore format: one row a line
-export const tableG2: readonly (readonly [dof: number, ...values: number[]])[] = [
+const tableG2: readonly (readonly [dof: number, ...values: number[]])[] = [
   [1, 1.837, 6.314, 12.706, 13.968, 63.657, 235.784],
   [2, 1.321, 2.92, 4.303, 4.527, 9.925, 19.206],
   [3, 1.197, 2.353, 3.182, 3.307, 5.841, 9.219],
@@ -36,4 +39,24 @@ export const tableG2: readonly (readonly [dof: number, ...values: number[]])[] =
   [50, 1.01, 1.676, 2.009, 2.051, 2.678, 3.157],
   [100, 1.005, 1.66, 1.984, 2.025, 2.626, 3.077],
   [Number.POSITIVE_INFINITY, 1.0, 1.645, 1.96, 2.0, 2.576, 3.0],
+];
+
+export const tableG2Sets: readonly PublishedSet[] = [
+  {
+    source: "JCGM 100:2008 (GUM), table G.2 to three decimals (an independent library; printed to two)",
+    origin: "computed",
+    compared: "coverage factor",
+    values: tableG2.flatMap(([dof, ...factors]) =>
+      factors.map((published, i) => {
+        const fraction = fractions[i] as number;
+        return {
+          what: `ν = ${Number.isFinite(dof) ? dof : "∞"}, ${fraction} %`,
+          unit: "",
+          published,
+          decimals: 3,
+          ours: () => coverageFactor(Math.min(dof, INFINITE_DOF), fraction / 100),
+        };
+      }),
+    ),
+  },
 ];

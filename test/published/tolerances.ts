@@ -52,9 +52,21 @@ export const printedIec: readonly PrintedRow[] = [
   { type: "B", name: "2", from: 600, to: 1700, proportion: 0.0025 },
   { type: "B", name: "3", from: 600, to: 800, constant: 4 },
   { type: "B", name: "3", from: 800, to: 1700, proportion: 0.005 },
-  // From memory:
+];
+
+/** The classes of the same standard that were not found in print. */
+export const iecFromMemory: readonly PrintedRow[] = [
   { type: "C", name: "2", from: 426, to: 2315, proportion: 0.01 },
   { type: "A", name: "2", from: 1000, to: 2500, proportion: 0.01 },
+];
+
+/** Class 1 of types R and S above its constant part: 1 °C + 0.3 % of what exceeds 1100 °C. */
+// biome-ignore format: one row a line
+export const classOneOfPlatinum: readonly (readonly [t: number, limit: number])[] = [
+  [1000, 1],
+  [1100, 1],
+  [1200, 1.3],
+  [1600, 2.5],
 ];
 
 /** ASTM E230/E230M: [type, class, t, ± °C] at both ends and beside the breakpoints (a summary sheet and four makers' tables). */
@@ -79,6 +91,16 @@ export const printedAstm: readonly (readonly [type: string, name: string, t: num
   ["B", "standard", 870, 4.35], ["B", "standard", 1700, 8.5],
   ["B", "special", 870, 2.175], ["B", "special", 1700, 4.25],
   ["C", "standard", 2315, 23.15],
+  // 2 % below 0 °C, not 1 % as some copies print.
+  ["K", "standard", -200, 4], ["K", "standard", -110, 2.2], ["K", "standard", -50, 2.2],
+  // A floor of 4.4 °C, which some copies leave out.
+  ["C", "standard", 100, 4.4], ["C", "standard", 440, 4.4], ["C", "standard", 441, 4.41],
+];
+
+/** The guide of the same standard for special limits below 0 °C (from memory). */
+export const astmFromMemory: readonly (readonly [type: string, name: string, t: number, limit: number])[] = [
+  ["T", "special", -100, 0.8],
+  ["E", "special", -200, 1],
 ];
 
 /** IEC 60751 tolerances in °C as tabulated by sensor makers (five copies). */
@@ -87,6 +109,12 @@ export const printedPlatinum: readonly (readonly [name: string, t: number, limit
   ["A", -100, 0.35], ["A", 0, 0.15], ["A", 100, 0.35], ["A", 200, 0.55], ["A", 300, 0.75], ["A", 400, 0.95],
   ["B", -100, 0.8], ["B", 0, 0.3], ["B", 100, 0.8], ["B", 200, 1.3], ["B", 300, 1.8], ["B", 400, 2.3],
   ["B", 500, 2.8], ["B", 600, 3.3],
+];
+
+/** IEC 60751, wire-wound sensors: where a class holds, °C (two copies). */
+// biome-ignore format: one row a line
+export const printedPlatinumRanges: readonly (readonly [name: string, from: number, to: number])[] = [
+  ["AA", -50, 250], ["A", -100, 450], ["B", -196, 600], ["C", -196, 600],
 ];
 
 /** IEC 60584-3, extension and compensating cables (an instrument maker's manual, two further pages): [cable, class, µV, ± °C, measuring junction °C] */

@@ -1,7 +1,7 @@
 /**
  * Least-squares fit of y = a + b·exp(−t/τ). For a given τ the best a and b are a straight-line fit on exp(−t/τ), so
  * only τ has to be searched (variable projection: G. H. Golub, V. Pereyra, SIAM J. Numer. Anal. 10 (1973) 413–432):
- * a scan over ln τ that cannot miss the minimum, then Gauss–Newton steps. One unknown needs no library.
+ * Gauss–Newton steps in ln τ, from the best of a scan. One unknown needs no library.
  */
 
 export interface ExponentialFit {
@@ -20,26 +20,24 @@ export interface ExponentialFit {
 }
 
 const PARAMETERS = 3;
-/** Between neighbours of the scan τ grows by this factor: the valley in ln τ is far wider. */
-const SCAN_FACTOR = 1.5;
 const MOST_STEPS = 60;
 /** Relative change of τ at which the search has arrived. */
 const ARRIVED = 1e-12;
 
-/** `times` rise from anywhere; at least three of them differ. `shortest` and `longest` bound τ. */
+/**
+ * `times` rise from anywhere; at least three of them differ. The search begins at `start` (`bestOfScan`); `shortest` and
+ * `longest` bound τ.
+ */
 export function exponentialFit(
   times: Float64Array,
   values: Float64Array,
+  start: number,
   shortest: number,
   longest: number,
 ): ExponentialFit {
   const curve = new Curve(times, values);
-  let timeConstant = shortest;
+  let timeConstant = start;
   let squares = curve.fit(timeConstant);
-  for (let tried = shortest * SCAN_FACTOR; tried <= longest; tried *= SCAN_FACTOR) {
-    const found = curve.fit(tried);
-    if (found < squares) [timeConstant, squares] = [tried, found];
-  }
   for (let step = 0; step < MOST_STEPS; step++) {
     curve.fit(timeConstant);
     let move = curve.gaussNewtonStep();
@@ -72,7 +70,7 @@ class Curve {
   final = 0;
   amplitude = 0;
   squares = 0;
-  private timeConstant = 1;
+  private timeConstant = Number.NaN;
   private meanDecay = 0;
   private decaySquares = 0;
   /** exp(−t/τ) at each time. */
@@ -95,6 +93,7 @@ class Curve {
 
   /** Best a and b at this τ; returns the sum of the squared residuals. */
   fit(timeConstant: number): number {
+    if (timeConstant === this.timeConstant) return this.squares;
     const { decay, values } = this;
     const n = decay.length;
     this.timeConstant = timeConstant;

@@ -2,6 +2,7 @@
 import { measured, noAnswer, type Refusal } from "../errors";
 import { smallestStep } from "./despike";
 import { type ExponentialFit, exponentialFit } from "./exponential-fit";
+import { bestOfScan } from "./exponential-scan";
 import { lengthRefusal, type TimeGrid } from "./time-grid";
 
 export interface StepResponse {
@@ -17,7 +18,7 @@ export interface StepResponse {
 
 const SECONDS_PER_MINUTE = 60;
 const FEWEST_READINGS = 6;
-/** A step needs no more, and the fit of a longer record would take minutes. */
+/** A step needs no more, and the search for its start grows with the record. */
 const MOST_READINGS = 20_000;
 /** Readings that the response itself must have: its three parameters, and two to tell scatter from curve. */
 const FEWEST_IN_RESPONSE = 5;
@@ -46,14 +47,16 @@ export function timeConstant(grid: TimeGrid, temperatures: Float64Array): StepRe
   const wrongLength = lengthRefusal(grid.times, temperatures, "the record");
   if (wrongLength !== undefined) return wrongLength;
   const present = (_: number, i: number): boolean => !Number.isNaN(temperatures[i]);
-  const record = new Step(grid.times.filter(present), temperatures.filter(present));
-  if (record.count < FEWEST_READINGS) {
-    return noAnswer`${record.count} readings are too few to fit a step: at least ${FEWEST_READINGS}`;
+  const times = grid.times.filter(present);
+  const count = times.length;
+  if (count < FEWEST_READINGS) {
+    return noAnswer`${count} readings are too few to fit a step: at least ${FEWEST_READINGS}`;
   }
-  if (record.count > MOST_READINGS) {
-    return noAnswer`${record.count} readings are too many to fit a step: cut the record to the step, at most ${MOST_READINGS}`;
+  if (count > MOST_READINGS) {
+    return noAnswer`${count} readings are too many to fit a step: cut the record to the step, at most ${MOST_READINGS}`;
   }
-  if (!(record.span > 0)) return noAnswer`the times never rise`;
+  if (!((times[count - 1] as number) > (times[0] as number))) return noAnswer`the times never rise`;
+  const record = new Step(times, temperatures.filter(present));
   const from = record.start();
   const fit = record.curve(from);
   if (!record.standsOut(from, fit))
@@ -71,14 +74,16 @@ export function timeConstant(grid: TimeGrid, temperatures: Float64Array): StepRe
   return { timeConstant: seconds, uncertainty, initial, final: fit.final };
 }
 
-/** A record without missing readings: level, perhaps, up to the step, then the response. */
+/** A record without missing readings whose times rise: level, perhaps, up to the step, then the response. */
 class Step {
   readonly count: number;
-  readonly span: number;
   /** Sum of squared distances of the readings before each row from their own mean. */
   private readonly squaresBefore: Float64Array;
   private readonly means: Float64Array;
   private readonly shortest: number;
+  private readonly longest: number;
+  /** For each row, where the search for the time constant of the record from there on begins. */
+  private readonly starts: Float64Array;
   /** Squares that the logger's steps (a rectangle of that width) and the arithmetic leave in any fit. */
   private readonly unavoidable: number;
 
@@ -88,10 +93,10 @@ class Step {
   ) {
     const n = times.length;
     this.count = n;
-    this.span = n > 0 ? (times[n - 1] as number) - (times[0] as number) : 0;
+    const span = (times[n - 1] as number) - (times[0] as number);
     this.squaresBefore = new Float64Array(n + 1);
     this.means = new Float64Array(n + 1);
-    let shortest = this.span;
+    let shortest = span;
     for (let i = 0; i < n; i++) {
       const off = (values[i] as number) - (this.means[i] as number);
       this.means[i + 1] = (this.means[i] as number) + off / (i + 1);
@@ -101,6 +106,8 @@ class Step {
       if (interval > 0 && interval < shortest) shortest = interval;
     }
     this.shortest = shortest * SHORTEST_PART_OF_INTERVAL;
+    this.longest = span * LONGEST_IN_SPANS;
+    this.starts = bestOfScan(times, values, this.shortest, this.longest);
     this.unavoidable = n * (smallestStep(values) ** 2 / 12) + 1e-24 * (this.squaresBefore[n] as number);
   }
 
@@ -109,8 +116,14 @@ class Step {
   }
 
   curve(from: number): ExponentialFit {
-    const { times, values, shortest, span } = this;
-    return exponentialFit(times.subarray(from), values.subarray(from), shortest, span * LONGEST_IN_SPANS);
+    const { times, values, starts, shortest, longest } = this;
+    return exponentialFit(
+      times.subarray(from),
+      values.subarray(from),
+      starts[from] as number,
+      shortest,
+      longest,
+    );
   }
 
   /** Squares of a level up to a row and a curve from it, never under what cannot be avoided. */

@@ -30,6 +30,12 @@ export async function buildFormula(page: Page, id: string): Promise<void> {
   await page.getByRole("button", { name: "Build this formula" }).click();
 }
 
+/** Fills an argument with the cells that are selected, and with all below them that belong to the log. */
+export async function fillFromSelection(page: Page, argument: string): Promise<void> {
+  await page.getByRole("button", { name: `Use selection for ${argument}` }).click();
+  await page.getByRole("button", { name: "Down to row 2007" }).click();
+}
+
 export const select = (page: Page, range: string): Promise<void> =>
   page.evaluate((address) => window.beadlineSheet!.select(address), range);
 

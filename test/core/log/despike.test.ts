@@ -75,6 +75,8 @@ describe("the spike filter", () => {
     [1, 2],
     [5, 4],
     [40, 3],
+    [130, 3],
+    [1000, 3],
   ])("agrees with a plain recomputation: half window %d, threshold %d", (half, threshold) => {
     const noisy = Float64Array.from({ length: 300 }, (_, i) =>
       i % 37 === 5

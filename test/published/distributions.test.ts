@@ -1,0 +1,4 @@
+import { eachAgrees } from "./agrees";
+import { distributionSets } from "./distributions";
+
+eachAgrees(distributionSets);

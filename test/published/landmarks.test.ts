@@ -1,0 +1,4 @@
+import { eachAgrees } from "./agrees";
+import { landmarkSets } from "./landmarks";
+
+eachAgrees(landmarkSets);
