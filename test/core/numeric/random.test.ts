@@ -3,6 +3,13 @@ import { normalDeviates } from "../../../src/core/numeric/normal-deviates";
 import { stateFromSeed, xoshiro128 } from "../../../src/core/numeric/xoshiro128";
 
 describe("a seeded state", () => {
+  it("is that of the two first numbers of SplitMix64 (for seed 1234567, from memory)", () => {
+    const state = stateFromSeed(1_234_567).map((word) => BigInt.asUintN(32, BigInt(word)));
+    const [low = 0n, high = 0n, secondLow = 0n, secondHigh = 0n] = state;
+    expect((high << 32n) | low).toBe(6_457_827_717_110_365_317n);
+    expect((secondHigh << 32n) | secondLow).toBe(3_203_168_211_198_807_973n);
+  });
+
   it("is never all zeros, and differs in every word between neighbouring seeds", () => {
     const words = Array.from({ length: 50 }, (_, seed) => stateFromSeed(seed));
     for (let place = 0; place < 4; place++) {

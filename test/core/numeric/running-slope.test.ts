@@ -63,6 +63,23 @@ describe("the running slope", () => {
     expect([...late]).toEqual([Number.NaN, 2, 2]);
   });
 
+  it("loses none of a slow drift of a hot record among date serials, in windows of any width", () => {
+    const days = Float64Array.from({ length: 700 }, (_, i) => 45_000 + i / 60);
+    const slow = Float64Array.from(days, (day) => 1000 + (day - 45_000) * 3.7e-7);
+    for (const halfWidth of [0.5, 4]) {
+      const expected = textbookSlopes(days, slow, halfWidth);
+      runningSlope(days, slow, halfWidth).forEach((slope, i) => {
+        expect(Math.abs(slope / (expected[i] as number) - 1)).toBeLessThan(1e-6);
+      });
+    }
+  });
+
+  it("has no second abscissa among hundreds of points at one time", () => {
+    const at = new Float64Array(400).fill(3.7);
+    const held = Float64Array.from(at, (_, i) => 20 + (i % 3) / 7);
+    expect(runningSlope(at, held, 1).every(Number.isNaN)).toBe(true);
+  });
+
   it("keeps its digits far from zero: half a millionth of a degree a day among date serials", () => {
     const days = Float64Array.from({ length: 700 }, (_, i) => 45_000 + i / 64);
     const steady = Float64Array.from(days, (day) => 1000 + (day - 45_000) * 2 ** -21);
