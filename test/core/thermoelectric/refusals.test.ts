@@ -10,6 +10,7 @@ import {
   thermocouple,
   toIts90,
 } from "../../../src/core";
+import { unreachable } from "../../../src/core/thermoelectric/refusals";
 
 const couple = (name: string): Thermocouple => thermocouple(name) as Thermocouple;
 const fahrenheit = temperatureUnits.find(({ symbol }) => symbol === "F");
@@ -67,6 +68,12 @@ describe("an EMF without a temperature", () => {
     );
     expect(message(temperatureOf(couple("Au/Pt"), -1, 0))).toBe(
       "EMF -1 mV is below the limit of Au/Pt, 0 mV (0 °C)",
+    );
+  });
+
+  it("is what an EMF comes to, unless the caller knows better", () => {
+    expect(message(unreachable(couple("K"), 60))).toMatch(
+      /^the EMF comes to 60 mV, above the limit of type K, 54\.886\d? mV \(1372 °C\)$/,
     );
   });
 
