@@ -69,7 +69,7 @@ describe("the running slope", () => {
     for (const halfWidth of [0.5, 4]) {
       const expected = textbookSlopes(days, slow, halfWidth);
       runningSlope(days, slow, halfWidth).forEach((slope, i) => {
-        expect(Math.abs(slope / (expected[i] as number) - 1)).toBeLessThan(1e-6);
+        expect(Math.abs(slope / (expected[i] as number) - 1)).toBeLessThan(2e-8);
       });
     }
   });

@@ -42,6 +42,12 @@ describe("a column", () => {
     expect([couple.single, couple.columns]).toEqual([single, columns]);
   });
 
+  it("of a couple is filled as far as it counts and not beyond", () => {
+    const temperatures = new Float64Array(4).fill(Number.NaN);
+    k.temperatures(Float64Array.of(1, 60, k.emfHigh, 5), temperatures, 3);
+    expect([...temperatures]).toEqual([k.temperature(1), Number.NaN, 1372, Number.NaN]);
+  });
+
   it("is filled as far as it counts and not beyond", () => {
     const references = Float64Array.of(25, 26, 25, 25);
     const temperatures = results();

@@ -38,6 +38,7 @@ describe("IPTS-68 to ITS-90", () => {
         if (Math.abs(second) > largest.step) largest = { step: Math.abs(second), at: onIts90(t68) };
       }
       expect(largest.step).toBeGreaterThan(1e-6);
+      expect(largest.step).toBeLessThan(1e-3);
       expect(Math.abs(largest.at - join)).toBeLessThan(0.012);
     },
   );

@@ -28,7 +28,6 @@ describe.each(
     .map(({ name, segment }) => [`${name} from ${segment.from} °C`, segment] as const),
 )("type %s", (_, segment) => {
   const { from, to, coefficients } = segment;
-  const made = new Segment(segment);
   const [near, far] = Math.abs(from) < Math.abs(to) ? [from, to] : [to, from];
   const at = (step: number): number => near + ((far - near) * step) / STEPS;
   const first = Array.from({ length: STEPS + 1 }, (_, i) => i).find(
@@ -36,6 +35,7 @@ describe.each(
   );
 
   it("is summed plainly from its end nearest to 0 °C as far as the bound allows, and compensated beyond", () => {
+    const made = new Segment(segment);
     // The step before the first that is not allowed is the last that is plain; in between is either.
     for (let i = 0; i <= STEPS; i++) {
       for (const t of [at(i), at(Math.min(i + 0.37, STEPS))]) {
