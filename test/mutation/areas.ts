@@ -26,7 +26,6 @@ export const areas: Readonly<Record<string, Area>> = {
       "test/core/thermoelectric/*.test.ts",
       "test/published/{emf-tables,inverse-approximations,conversions,landmarks,scale-differences}.test.ts",
       "test/properties/thermoelectric.test.ts",
-      "test/functions/convert.test.ts",
     ],
   },
   junction: core("junction", [
@@ -39,7 +38,7 @@ export const areas: Readonly<Record<string, Area>> = {
     "test/functions/correct.test.ts",
   ]),
   conformity: core("conformity", [
-    "test/published/decision-rules.test.ts",
+    "test/published/{decision-rules,tolerances}.test.ts",
     "test/properties/conformity.test.ts",
     "test/functions/judge.test.ts",
   ]),
@@ -56,7 +55,7 @@ export const areas: Readonly<Record<string, Area>> = {
   ]),
   words: {
     mutate: ["src/core/errors.ts", "src/core/units.ts"],
-    tests: ["test/core/messages.test.ts", "test/functions/*.test.ts"],
+    tests: ["test/core/{messages,units}.test.ts", "test/functions/*.test.ts"],
   },
   coercion: {
     mutate: [

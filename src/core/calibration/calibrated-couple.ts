@@ -70,7 +70,7 @@ export class CalibratedCouple implements Rising {
     if (!(t >= low - SAME_TEMPERATURE && t <= high + SAME_TEMPERATURE)) {
       return noAnswer`temperature ${degrees(t)} is outside the calibrated range, ${degrees(low)} to ${degrees(high)}`;
     }
-    const emf = this.value(t < low ? low : Math.min(t, high)) - this.atReference(reference, by);
+    const emf = this.value(Math.min(Math.max(t, low), high)) - this.atReference(reference, by);
     return Number.isNaN(emf) ? this.referenceRefused(reference) : emf;
   }
 
@@ -85,7 +85,7 @@ export class CalibratedCouple implements Rising {
     const sum = emf + this.atReference(reference, by);
     if (sum > emfLow && sum < emfHigh) {
       // One segment at a time: where two do not meet, the join, and where they overlap, the lower one.
-      const i = this.emfEnds.findIndex((end, at) => at > 0 && sum <= end);
+      const i = this.emfEnds.findIndex((end) => sum <= end);
       const [from, to] = [this.ends[i - 1] as number, this.ends[i] as number];
       return whereReached(this, sum, from, to, couple.temperature(sum), CONVERGED);
     }

@@ -34,9 +34,8 @@ export class Certificate {
    */
   correction(t: number, name = "reading"): number | Refusal {
     const { first, last } = this;
-    if (t >= first && t <= last) return this.curve(t);
     if (t >= first - SAME_TEMPERATURE && t <= last + SAME_TEMPERATURE) {
-      return this.curve(t < first ? first : last);
+      return this.curve(Math.min(Math.max(t, first), last));
     }
     return first === last
       ? noAnswer`${name} ${degrees(t)} is not the certificate's only point, ${degrees(first)}`

@@ -30,12 +30,11 @@ export class CorrectionUncertainty {
   private beside(t: number): number {
     const { points, standard } = this;
     const i = intervalOf(points, t);
-    const next = Math.min(i + 1, points.length - 1);
     const left = standard[i] as number;
-    const right = standard[next] as number;
     if (t - (points[i] as number) <= SAME_TEMPERATURE) return left;
-    if ((points[next] as number) - t <= SAME_TEMPERATURE) return right;
-    return Math.max(left, right);
+    // Between two points, then: of a single one every reading is the point.
+    const right = standard[i + 1] as number;
+    return (points[i + 1] as number) - t <= SAME_TEMPERATURE ? right : Math.max(left, right);
   }
 }
 
@@ -51,8 +50,7 @@ export function correctionUncertainty(
 ): CorrectionUncertainty | Refusal {
   const refusal = countRefused(points, expanded, "expanded uncertainties") ?? orderRefused(points);
   if (refusal !== undefined) return refusal;
-  const usable = k > 0 && expanded.every((uncertainty) => Number.isFinite(uncertainty / k));
-  if (!usable) return wrongKind`coverage factor k ${k} is not above 0`;
+  if (!(k > 0)) return wrongKind`coverage factor k ${k} is not above 0`;
   const bad = expanded.findIndex((uncertainty) => !(uncertainty > 0));
   if (bad >= 0) {
     const uncertainty = expanded[bad] as number;
@@ -60,9 +58,7 @@ export function correctionUncertainty(
       ? wrongKind`expanded uncertainty of point ${bad + 1} is 0 or an empty cell`
       : wrongKind`expanded uncertainty of point ${bad + 1} is ${degreesApart(uncertainty)}, not above 0`;
   }
-  const [rows, standard] = rising(
-    points,
-    expanded.map((uncertainty) => uncertainty / k),
-  );
-  return new CorrectionUncertainty(rows, standard);
+  const standard = expanded.map((uncertainty) => uncertainty / k);
+  if (!standard.every(Number.isFinite)) return wrongKind`coverage factor k ${k} is too near to 0`;
+  return new CorrectionUncertainty(...rising(points, standard));
 }

@@ -18,7 +18,8 @@ export function acceptanceLimit(
     refusedUnlessPositive(limit, "limit") ?? refusedUnlessPositive(uncertainty, "expanded uncertainty");
   if (refused !== undefined) return refused;
   const band = rule.multiple * uncertainty;
-  if (toNinthDecimal(band) <= toNinthDecimal(limit)) return Math.max(0, limit - band);
+  // Asked as a verdict asks it, so that whatever passes lies within a limit that is there.
+  if (toNinthDecimal(limit - band) >= 0) return Math.max(0, limit - band);
   return rule.multiple === 1
     ? noAnswer`U exceeds the limit: ${uncertainty} is more than ${limit}`
     : noAnswer`guard band ${rule.multiple} × ${uncertainty} exceeds the limit ${limit}`;

@@ -23,7 +23,7 @@ interface Found {
 
 /** The row of one cable and class in the standard that has this class. */
 function find(designation: string, className: string): Found | Refusal {
-  const name = designation.toUpperCase().replace(/\s+/g, "");
+  const name = designation.toUpperCase().replace(/\s/g, "");
   if (!cableDesignations.includes(name)) {
     return wrongKind`cable "${designation.trim().slice(0, 30)}" is unknown: ${cableDesignations.join(" ")}`;
   }
@@ -63,8 +63,8 @@ export function cableToleranceUv(
   if (!(temperature >= cable.from && temperature <= cable.to)) {
     return noAnswer`temperature of the head ${degrees(temperature)} is outside the range of ${found.designation}, ${degrees(cable.from)} to ${degrees(cable.to)}`;
   }
-  const slope = seebeckAt(thermocouple(cable.couple) as Thermocouple, temperature);
-  return typeof slope === "number" ? tolerance.degrees * slope : slope;
+  // The range of a cable lies inside the reference function of its couple.
+  return tolerance.degrees * ((thermocouple(cable.couple) as Thermocouple).seebeck(temperature) * 1000);
 }
 
 /**

@@ -1,8 +1,9 @@
 /** The tightest tolerance class that a set of points meets. */
 import { noAnswer, type Refusal, wrongKind } from "../errors";
 import { toNinthDecimal } from "../numeric/ninth-decimal";
+import { inWords } from "../thermoelectric/designation";
 import { toleranceClassesOf } from "./tolerance";
-import { sensorInWords, type ToleranceClass } from "./tolerance-class";
+import type { ToleranceClass } from "./tolerance-class";
 import type { ToleranceClassName } from "./tolerance-table";
 
 export const classStandards = ["IEC", "ASTM"] as const;
@@ -27,8 +28,7 @@ export function classMet(
   const classes = toleranceClassesOf(designation).filter(
     (one) => (one.standard === "astmE230") === (standard === "ASTM"),
   );
-  if (classes.length === 0)
-    return noAnswer`${standard} has no tolerance class for ${sensorInWords(designation)}`;
+  if (classes.length === 0) return noAnswer`${standard} has no tolerance class for ${inWords(designation)}`;
   let best: ToleranceClassName | "none" = "none";
   let smallest = Number.POSITIVE_INFINITY;
   for (const one of classes) {

@@ -45,7 +45,7 @@ export function largestPassRisk(
   if (refused !== undefined) return refused;
   const band = finite(rule.multiple * expandedUncertainty, "guard band");
   if (typeof band !== "number") return band;
-  if (toNinthDecimal(2 * band) > toNinthDecimal(upper - bottom)) {
+  if (toNinthDecimal(bottom + band) > toNinthDecimal(upper - band)) {
     return noAnswer`the guard band leaves nothing to pass`;
   }
   // In units of u = U/k: the band is r·k wide, and the rest of the tolerance lies beyond the other limit.

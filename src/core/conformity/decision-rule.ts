@@ -20,7 +20,7 @@ const byName: ReadonlyMap<string, DecisionRule> = new Map(
 );
 
 /** `guarded 0.83`: ISO 14253-1:2017, a one-sided 5 % risk with k = 2. */
-const WITH_MULTIPLE = /^(guarded|conditional) (\d+(?:\.\d+)?)$/;
+const WITH_MULTIPLE = /^(?<kind>guarded|conditional) (?<digits>\d+(?:\.\d+)?)$/;
 
 /**
  * A rule from its name: "simple", "guarded", "conditional", or one of the last two with
@@ -31,9 +31,9 @@ export function decisionRule(text: string): DecisionRule | Refusal {
   const name = text.trim().toLowerCase().replace(/\s+/g, " ");
   const plain = byName.get(name);
   if (plain !== undefined) return plain;
-  const [, kind, digits] = WITH_MULTIPLE.exec(name) ?? [];
+  const { kind, digits } = WITH_MULTIPLE.exec(name)?.groups ?? {};
   const multiple = Number(digits);
-  if (kind === undefined || !Number.isFinite(multiple)) {
+  if (!Number.isFinite(multiple)) {
     return wrongKind`rule "${text.trim().slice(0, 30)}" is unknown: simple, guarded, conditional, or such as guarded 0.83`;
   }
   if (multiple === 0) return wrongKind`a guard band of 0 × U is the rule "simple"`;

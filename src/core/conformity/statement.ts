@@ -44,14 +44,14 @@ export function statement(
     refusedUnlessPositive(expandedUncertainty, "expanded uncertainty", degreesApart) ??
     refusedUnlessPositive(k, "coverage factor");
   if (refused !== undefined) return refused;
-  const reached = verdict(error, limit, expandedUncertainty, rule);
-  if (reached instanceof Refusal) return reached;
+  // Neither a verdict nor, where something can pass, its risk has anything left to refuse.
+  const reached = verdict(error, limit, expandedUncertainty, rule) as Verdict;
   const guardBand = finite(rule.multiple * expandedUncertainty, "guard band");
   if (guardBand instanceof Refusal) return guardBand;
   const acceptance = acceptanceLimit(limit, expandedUncertainty, rule);
   const left = acceptance instanceof Refusal ? undefined : acceptance;
-  const risk = left === undefined ? undefined : largestPassRisk(limit, expandedUncertainty, rule, k);
-  if (risk instanceof Refusal) return risk;
+  const risk =
+    left === undefined ? undefined : (largestPassRisk(limit, expandedUncertainty, rule, k) as number);
   return {
     verdict: reached,
     rule,
@@ -94,9 +94,10 @@ function finding(
       ? `the guard band of ${print(guardBand)} exceeds it`
       : `not within the acceptance limit of ±${print(acceptance)}`;
   if (reached === "Pass") {
-    return guardBand === 0 || acceptance === undefined
+    // Whatever passes has an acceptance limit.
+    return guardBand === 0
       ? `${theError} lies within ${theLimit}`
-      : `${theError} lies within the acceptance limit of ±${print(acceptance)}, ${theLimit} less the guard band`;
+      : `${theError} lies within the acceptance limit of ±${print(acceptance as number)}, ${theLimit} less the guard band`;
   }
   if (reached === "Conditional fail")
     return `${theError} exceeds ${theLimit}, by no more than the guard band`;

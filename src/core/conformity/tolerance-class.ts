@@ -2,11 +2,8 @@
 import { degrees, noAnswer, type Refusal } from "../errors";
 import { toNinthDecimal } from "../numeric/ninth-decimal";
 import type { PublicationId } from "../publications";
+import { inWords } from "../thermoelectric/designation";
 import type { ToleranceClassName, TolerancePart } from "./tolerance-table";
-
-/** "type K" for a letter, "Pt" and conductors as they are. */
-export const sensorInWords = (designation: string): string =>
-  /^[A-Z](-\d)?$/.test(designation) ? `type ${designation}` : designation;
 
 export class ToleranceClass {
   readonly from: number;
@@ -30,7 +27,7 @@ export class ToleranceClass {
   /** ± limit in °C at `t` °C. */
   limit(t: number): number | Refusal {
     if (!this.covers(t)) {
-      return noAnswer`temperature ${degrees(t)} is outside class ${this.name} of ${sensorInWords(this.designation)}, ${degrees(this.from)} to ${degrees(this.to)}`;
+      return noAnswer`temperature ${degrees(t)} is outside class ${this.name} of ${inWords(this.designation)}, ${degrees(this.from)} to ${degrees(this.to)}`;
     }
     const part = this.parts.find(({ to }) => t <= to) ?? (this.parts[this.parts.length - 1] as TolerancePart);
     const size = Math.abs(t);

@@ -1,11 +1,11 @@
 /** Tolerances of new thermocouple wire and of the platinum sensor at the reference junction. */
 import { degrees, noAnswer, type Refusal, wrongKind } from "../errors";
-import { seebeckAt } from "../thermoelectric/convert";
+import { inWords } from "../thermoelectric/designation";
 import type { Thermocouple } from "../thermoelectric/thermocouple";
 import { astmE230 } from "./classes/astm-e230";
 import { iec60584_1 } from "./classes/iec-60584-1";
 import { iec60751 } from "./classes/iec-60751";
-import { sensorInWords, ToleranceClass } from "./tolerance-class";
+import { ToleranceClass } from "./tolerance-class";
 import { type ToleranceClassName, type ToleranceTable, toleranceClassNames } from "./tolerance-table";
 
 const tables: readonly ToleranceTable[] = [iec60584_1, astmE230, iec60751];
@@ -33,7 +33,7 @@ export const toleranceClassName = (text: string): ToleranceClassName | undefined
   officialNames.get(
     text
       .toLowerCase()
-      .replace(/\s+/g, "")
+      .replace(/\s/g, "")
       .replace(/^class(?=.)/, ""),
   );
 
@@ -54,13 +54,12 @@ export function toleranceClass(designation: string, name: string): ToleranceClas
 
 /** "type J has no class 3: it has class 1 from -40 °C to 750 °C, class 2 from …", those of the standard that has the asked one first. */
 function lacking(designation: string, name: ToleranceClassName, classes: readonly ToleranceClass[]): Refusal {
-  if (classes.length === 0)
-    return noAnswer`no tolerance class is published for ${sensorInWords(designation)}`;
+  if (classes.length === 0) return noAnswer`no tolerance class is published for ${inWords(designation)}`;
   const home = tables.find(({ sensors }) =>
     Object.values(sensors).some(({ classes: published }) => published[name] !== undefined),
-  );
-  const sameStandard = classes.filter(({ standard }) => standard === home?.standard);
-  let refusal = noAnswer`${sensorInWords(designation)} has no class ${name}: it has`;
+  ) as ToleranceTable;
+  const sameStandard = classes.filter(({ standard }) => standard === home.standard);
+  let refusal = noAnswer`${inWords(designation)} has no class ${name}: it has`;
   for (const [i, { name: other, from, to }] of (sameStandard.length > 0 ? sameStandard : classes).entries()) {
     refusal = refusal.and`${i === 0 ? " " : ", "}class ${other} from ${degrees(from)} to ${degrees(to)}`;
   }
@@ -84,6 +83,7 @@ export function tolerance(designation: string, className: string, t: number): nu
 export function toleranceUv(couple: Thermocouple, className: string, t: number): number | Refusal {
   const limit = tolerance(couple.designation, className, t);
   if (typeof limit !== "number") return limit;
-  const slope = seebeckAt(couple, t);
-  return typeof slope === "number" ? limit * slope : slope;
+  // A class lies inside the reference function; past an end of both by rounding, that end counts for both.
+  const inside = Math.min(Math.max(t, couple.low), couple.high);
+  return limit * (couple.seebeck(inside) * 1000);
 }

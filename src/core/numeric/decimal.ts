@@ -14,9 +14,9 @@ export interface Decimal {
 const SIGNIFICANT = 15;
 
 export function decimal(value: number): Decimal {
-  const [mantissa = "", exponent] = Math.abs(value)
+  const [mantissa, exponent] = Math.abs(value)
     .toExponential(SIGNIFICANT - 1)
-    .split("e");
+    .split("e") as [string, string];
   const leadingPlace = Number(exponent);
   return {
     negative: value < 0,

@@ -70,7 +70,7 @@ function backward(
   diagonal: readonly DoubleDouble[],
   b: readonly DoubleDouble[],
 ): DoubleDouble[] {
-  const x: DoubleDouble[] = diagonal.map(() => zero);
+  const x: DoubleDouble[] = [];
   for (let i = diagonal.length - 1; i >= 0; i--) {
     let known = zero;
     for (let j = i + 1; j < diagonal.length; j++) {

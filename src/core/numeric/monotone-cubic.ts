@@ -30,12 +30,11 @@ function harmonic(before: number, after: number, chordBefore: number, chordAfter
   return (weightBefore + weightAfter) / (weightBefore / chordBefore + weightAfter / chordAfter);
 }
 
-/** The parabola through three points, held back so that the shape stays. */
+/** The parabola through three points, held back so that the shape stays: chords of one sign make it less than 2 chords steep. */
 function atEnd(near: number, far: number, chordNear: number, chordFar: number): number {
   const slope = ((2 * near + far) * chordNear - near * chordFar) / (near + far);
   if (slope * chordNear <= 0) return 0;
-  const turns = chordNear * chordFar <= 0;
-  return turns && Math.abs(slope) > 3 * Math.abs(chordNear) ? 3 * chordNear : slope;
+  return Math.abs(slope) > 3 * Math.abs(chordNear) ? 3 * chordNear : slope;
 }
 
 /** The cubic between points i and i + 1, at x. */

@@ -53,7 +53,8 @@ export function normalBetween(from: number, to: number): number {
 }
 
 const normal: SymmetricDistribution = {
-  central: (z) => (z > SERIES_TO ? 1 - 2 * farTail(z) : 2 * halfCentral(z)),
+  // Asked where it is the smaller of the two, far below `SERIES_TO`.
+  central: (z) => 2 * halfCentral(z),
   outside: (z) => 2 * normalAbove(z),
   density,
 };

@@ -10,14 +10,12 @@ export class SlopeSums {
   private y = 0;
   private xx = 0;
   private xy = 0;
-  private apart = false;
   private originX = 0;
   private originY = 0;
 
   /** No points, counted from here. */
   from(originX: number, originY: number): this {
     this.n = this.x = this.y = this.xx = this.xy = 0;
-    this.apart = false;
     this.originX = originX;
     this.originY = originY;
     return this;
@@ -27,7 +25,6 @@ export class SlopeSums {
     const dy = y - this.originY;
     if (Number.isNaN(dy)) return;
     const dx = x - this.originX;
-    if (dx !== 0) this.apart = true;
     this.n++;
     this.x += dx;
     this.y += dy;
@@ -37,10 +34,8 @@ export class SlopeSums {
 
   /** All points of another sum, moved to this one's origin. */
   part(other: SlopeSums): void {
-    if (other.n === 0) return;
     const dx = other.originX - this.originX;
     const dy = other.originY - this.originY;
-    if (other.apart || dx !== 0) this.apart = true;
     this.n += other.n;
     this.x += other.x + other.n * dx;
     this.y += other.y + other.n * dy;
@@ -48,10 +43,18 @@ export class SlopeSums {
     this.xy += other.xy + dx * other.y + dy * other.x + other.n * dx * dy;
   }
 
-  /** NaN when the points have no second abscissa. */
+  /** NaN when all points lie at the origin's abscissa: 0/0. The origin itself is one of them. */
   slope(): number {
     const { n, x, y, xx, xy } = this;
-    return this.apart ? (n * xy - x * y) / (n * xx - x * x) : Number.NaN;
+    return (n * xy - x * y) / (n * xx - x * x);
+  }
+
+  /** The points of both, about this one's origin. */
+  with(other: SlopeSums): SlopeSums {
+    const both = new SlopeSums().from(this.originX, this.originY);
+    both.part(this);
+    both.part(other);
+    return both;
   }
 }
 
@@ -69,15 +72,12 @@ export class SlopeParts {
       for (let i = start; i < start + SMALLEST_PART; i++) part.point(x[i] as number, y[i] as number);
       parts.push(part);
     }
-    for (let size = SMALLEST_PART; parts.length > 0; size *= 2) {
+    while (parts.length > 0) {
       this.levels.push(parts);
       const halves = parts;
       parts = [];
       for (let k = 0; k + 1 < halves.length; k += 2) {
-        const part = this.origin((k / 2) * 2 * size);
-        part.part(halves[k] as SlopeSums);
-        part.part(halves[k + 1] as SlopeSums);
-        parts.push(part);
+        parts.push((halves[k] as SlopeSums).with(halves[k + 1] as SlopeSums));
       }
     }
   }

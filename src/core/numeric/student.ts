@@ -51,7 +51,8 @@ function student(dof: number): SymmetricDistribution {
   const nearCentral = (t: number): number =>
     2 * t * density(t) * betaFraction(0.5, dof / 2, (t * t) / (dof + t * t));
   return {
-    central: (t) => (t * t > nearTo ? 1 - farOutside(t) : nearCentral(t)),
+    // Asked where it is the smaller of the two, and so t not beyond `nearTo`.
+    central: nearCentral,
     outside: (t) => (t * t > nearTo ? farOutside(t) : 1 - nearCentral(t)),
     density,
   };

@@ -8,7 +8,7 @@
  * accuracy however close p is to 0 or 1.
  */
 export interface SymmetricDistribution {
-  /** P(|X| ≤ x) */
+  /** P(|X| ≤ x), asked only on the way to a probability of ½ or less. */
   central(x: number): number;
   /** P(|X| > x) */
   outside(x: number): number;
@@ -23,7 +23,7 @@ const MOST_STEPS = 100;
 /** A step below this changes nothing that counts: the next one would be its square. */
 const CONVERGED = 1e-9;
 
-/** `inside` = P(|X| ≤ x), above 0 and below 1; `start` any positive guess. */
+/** `inside` = P(|X| ≤ x), above 0 and below 1; `start` any positive guess, above ½ not far below the root. */
 export function twoSidedQuantile(distribution: SymmetricDistribution, inside: number, start: number): number {
   if (inside < FLAT) return inside / (2 * distribution.density(0));
   const fromOutside = inside > 0.5;
@@ -32,7 +32,8 @@ export function twoSidedQuantile(distribution: SymmetricDistribution, inside: nu
   for (let i = 0; i < MOST_STEPS; i++) {
     const reached = fromOutside ? distribution.outside(x) : distribution.central(x);
     const slope = (2 * distribution.density(x) * x) / reached;
-    const step = ((Math.log(reached) - Math.log(wanted)) / slope) * (fromOutside ? 1 : -1);
+    const distance = (Math.log(reached) - Math.log(wanted)) / slope;
+    const step = fromOutside ? distance : -distance;
     x *= Math.exp(step);
     if (Math.abs(step) < CONVERGED) break;
   }

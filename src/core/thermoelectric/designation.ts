@@ -7,7 +7,7 @@ import { Thermocouple } from "./thermocouple";
 const plain = (name: string): string =>
   name
     .toLowerCase()
-    .replace(/\s+/g, "")
+    .replace(/\s/g, "")
     .replace(/^type(?=.)/, "");
 
 const references = new Map<string, ReferenceFunction>();
@@ -29,9 +29,11 @@ export function thermocouple(name: string): Thermocouple | undefined {
   return couple;
 }
 
-/** "type K" for a letter, the conductors alone for the others. */
-export const spoken = ({ designation }: Thermocouple): string =>
+/** "type K" for a letter, the conductors alone for the others, and "Pt". */
+export const inWords = (designation: string): string =>
   /^[A-Z](-\d)?$/.test(designation) ? `type ${designation}` : designation;
+
+export const spoken = ({ designation }: Thermocouple): string => inWords(designation);
 
 /** Designations in the order in which they are shown: letter types first. */
 export const letterDesignations: readonly string[] = letterTypes.map(({ designation }) => designation);

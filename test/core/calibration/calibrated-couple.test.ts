@@ -58,12 +58,41 @@ describe("a calibrated couple", () => {
     expect(own.temperature(Number.POSITIVE_INFINITY, 0)).toBeInstanceOf(Refusal);
   });
 
+  it("takes what lies beyond an end by no more than 1E-9, °C or mV, as that end", () => {
+    for (const by of [0, 5e-10, 1e-9]) {
+      expect(own.emf(0 - by, 0)).toBe(own.emfLow);
+      expect(own.emf(1200 + by, 0)).toBe(own.emfHigh);
+      expect(own.temperature(own.emfLow - by, 0)).toBe(0);
+      expect(own.temperature(own.emfHigh + by, 0)).toBe(1200);
+    }
+    expect(message(own.emf(-2e-9, 0))).toContain("is outside the calibrated range, 0 °C to 1200 °C");
+    expect(own.emf(1200 + 2e-9, 0)).toBeInstanceOf(Refusal);
+    expect(own.temperature(own.emfLow - 2e-9, 0)).toBeInstanceOf(Refusal);
+    expect(own.temperature(own.emfHigh + 2e-9, 0)).toBeInstanceOf(Refusal);
+    // So it is where the reference function ends as well.
+    const whole = made(s, [1], -50, 1000);
+    expect(whole.emf(-50 - 5e-10, 0)).toBe(whole.emfLow);
+  });
+
+  it("knows its deviation at the very ends of its range", () => {
+    const high = made(s, coefficients, 400, 1100);
+    expect(high.emf(400, 400, "individual")).toBe(0);
+    expect(high.emf(1100, 1100, "individual")).toBe(0);
+    expect(message(high.emf(800, 1101, "individual"))).toContain("reference temperature 1101 °C is outside");
+  });
+
+  it("does not mind what its deviation would do outside the range, in the next segment", () => {
+    // ΔE' = −0.011 t passes the slope of type S, 11.5 µV/°C at 1000 °C, near 1060 °C; the next segment starts at 1064.18 °C.
+    expect(made(s, [0, 0, -0.0055], 0, 1000).high).toBe(1000);
+    expect(message(calibratedCouple(s, [0, 0, -0.0055], 0, 1150))).toContain("turns back at 10");
+  });
+
   it("does not extrapolate its deviation to a reference junction outside the range", () => {
     const high = made(s, coefficients, 400, 1100);
     expect(message(high.emf(800, 25, "individual"))).toBe(
       "reference temperature 25 °C is outside the calibrated range, 400 °C to 1100 °C: the couple's own deviation there is not known",
     );
-    expect(high.temperature(5, 25, "individual")).toBeInstanceOf(Refusal);
+    expect(message(high.temperature(5, 25, "individual"))).toBe(message(high.emf(800, 25, "individual")));
     expect(message(high.emf(800, 5000))).toContain(
       "reference temperature 5000 °C is outside the range of type S",
     );
@@ -132,11 +161,14 @@ describe("coefficients that are refused", () => {
     expect(message(calibratedCouple(s, [0], 0, 1800))).toBe(
       "high 1800 °C is outside the range of type S, -50 °C to 1768.1 °C",
     );
+    expect(message(calibratedCouple(s, [0], -60, 1000))).toBe(
+      "low -60 °C is outside the range of type S, -50 °C to 1768.1 °C",
+    );
     expect(message(calibratedCouple(s, [], 0, 1000))).toBe("no coefficients are given");
   });
 
   it("are too large for a double", () => {
     expect(calibratedCouple(s, [0, 1e308, 1e308], 0, 1000)).toBeInstanceOf(Refusal);
-    expect(calibratedCouple(s, [1e308, 1], 0, 1000)).toBeInstanceOf(Refusal);
+    expect(message(calibratedCouple(s, [1e308, 1], 0, 1000))).toBe("the coefficients are too large");
   });
 });

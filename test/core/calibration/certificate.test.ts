@@ -69,13 +69,16 @@ describe("a certificate", () => {
     expect(sensor.correction(2)).toBeCloseTo(4.5, 14);
   });
 
-  it("of one point serves that reading alone", () => {
-    const sensor = made([850], [-1.2]);
-    expect(sensor.correction(850)).toBe(-1.2);
-    expect(message(sensor.correction(851))).toBe(
-      "reading 851 °C is not the certificate's only point, 850 °C",
-    );
-  });
+  it.each(["linear", "nearest", "smooth"] as const)(
+    "of one point, read by %s, serves that reading alone",
+    (method) => {
+      const sensor = made([850], [-1.2], { method });
+      expect(sensor.correction(850)).toBe(-1.2);
+      expect(message(sensor.correction(851))).toBe(
+        "reading 851 °C is not the certificate's only point, 850 °C",
+      );
+    },
+  );
 });
 
 describe("a certificate is never extrapolated", () => {
@@ -92,7 +95,10 @@ describe("a certificate is never extrapolated", () => {
   it("but a reading that differs from an end by rounding is that end", () => {
     expect(sensor.correction(900 + 5e-10)).toBe(0.5);
     expect(sensor.correction(100 - 5e-10)).toBe(0.2);
+    expect(sensor.correction(900 + 1e-9)).toBe(0.5);
+    expect(sensor.correction(100 - 1e-9)).toBe(0.2);
     expect(sensor.correction(900 + 2e-9)).toBeInstanceOf(Refusal);
+    expect(sensor.correction(100 - 2e-9)).toBeInstanceOf(Refusal);
   });
 });
 
@@ -148,9 +154,16 @@ describe("points that are refused", () => {
   it("numbers that are no temperatures, and points that a double can hardly tell apart", () => {
     expect(message(certificate([1, 2, 3], [0, 1e308, 0]))).toBe("point 2 or its value is no temperature");
     expect(message(certificate([-1e9, 2], [0, 0]))).toBe("point 1 or its value is no temperature");
-    expect(message(certificate([0, 1e-320, 1], [0, 1, 0], { method: "smooth" }))).toBe(
-      "the certificate's points lie too close together",
-    );
+    expect(message(certificate([1, 1e6], [0, 0]))).toBe("point 2 or its value is no temperature");
+    expect(made([1, 999_999], [0, 0]).last).toBe(999_999);
+    for (const [last, method] of [
+      [1, "smooth"],
+      [2e-320, "fit1"],
+    ] as const) {
+      expect(message(certificate([0, 1e-320, last], [0, 1, 0], { method }))).toBe(
+        "the certificate's points lie too close together",
+      );
+    }
   });
 });
 
@@ -168,12 +181,21 @@ describe("the uncertainty of a correction", () => {
     expect([0, 200, 400].map((t) => at(t))).toEqual([0.3, 0.5, 0.4]);
   });
 
+  it("is so below zero too, and a point reaches 1E-9 °C to either side", () => {
+    const below = correctionUncertainty([-400, -200, 0], [0.6, 1, 0.8], 2);
+    const beside = (t: number) => (below instanceof Refusal ? below : below.at(t));
+    expect([-300, -100, -1e-9, 1e-9].map(beside)).toEqual([0.5, 0.5, 0.4, 0.4]);
+    expect(beside(-1.1e-9)).toBe(0.5);
+    expect([1e-9, 1.1e-9, -1e-9, 400 + 1e-9].map((t) => at(t))).toEqual([0.3, 0.5, 0.3, 0.4]);
+  });
+
   it("takes in the drift as a rectangular half-width", () => {
     expect(at(100, 0.6)).toBeCloseTo(Math.sqrt(0.25 + 0.12), 14);
   });
 
   it("is refused outside the points, and for a negative drift", () => {
     expect(message(at(401))).toBe("reading 401 °C is outside the certificate's points, 0 °C to 400 °C");
+    expect(message(at(-1))).toBe("reading -1 °C is outside the certificate's points, 0 °C to 400 °C");
     expect(message(at(100, -0.1))).toBe("drift allowance -0.1 °C is below 0");
   });
 
@@ -184,8 +206,20 @@ describe("the uncertainty of a correction", () => {
     expect(message(correctionUncertainty([0, 200], [-0.6, 1], 2))).toContain(
       "point 1 is -0.6 °C, not above 0",
     );
-    expect(message(correctionUncertainty([0, 200], [0.6, 1], 0))).toContain("coverage factor k 0");
-    expect(message(correctionUncertainty([0, 200], [0.6], 2))).toContain("differ in number");
+    for (const k of [0, -2]) {
+      expect(message(correctionUncertainty([0, 200], [0.6, 1], k))).toBe(
+        `coverage factor k ${k} is not above 0`,
+      );
+    }
+    expect(message(correctionUncertainty([0, 200], [1e300, 1], 1e-10))).toBe(
+      "coverage factor k 1e-10 is too near to 0",
+    );
+    expect(message(correctionUncertainty([0, 200], [0.6], 2))).toBe(
+      "points and expanded uncertainties differ in number, 2 and 1",
+    );
+    expect(message(correctionUncertainty([0, 0], [1, 1], 2))).toContain(
+      "points must rise or fall throughout",
+    );
   });
 
   it("serves a certificate of one point", () => {

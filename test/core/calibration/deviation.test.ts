@@ -34,6 +34,10 @@ describe("the deviation of a measured EMF", () => {
 
   it("is refused outside the reference function, by name", () => {
     expect(message(deviationUv(s, 1, 1800, 0))).toContain("temperature 1800 °C");
+    expect(message(deviationUv(s, 1e306, 100, 0))).toBe("EMF 1e+306 mV is beyond any couple");
+    expect(message(emfAtNominal(s, 1, 1800, 1000))).toBe(
+      "true temperature 1800 °C is outside the range of type S, -50 °C to 1768.1 °C",
+    );
     expect(message(deviationDegrees(s, 1, 1800, 0))).toContain("true temperature 1800 °C");
     expect(message(deviationDegrees(s, 100, 1000, 0))).toContain("above the limit of type S");
     expect(message(emfAtNominal(s, 1, 1000, 1800))).toContain("nominal temperature 1800 °C");
@@ -69,6 +73,38 @@ describe("a deviation function", () => {
     const fit = fitted([0, 1, 2, 3, 4], [0, 0, -5, 0, 0], 0);
     expect(fit.largestResidual).toBeCloseTo(-4, 14);
     expect(fit.dof).toBe(4);
+    // Residuals 1, 1, −4, 1, 1: √(20/4).
+    expect(fit.residualSd).toBeCloseTo(Math.sqrt(5), 14);
+    const weighted = fitted([0, 1, 2, 3, 4], [0, 0, -5, 0, 0], 0, { uncertainties: [2, 2, 2, 2, 2] });
+    expect(weighted.reducedChi2).toBeCloseTo(5 / 4, 14);
+  });
+
+  it("names the first of two residuals of one size", () => {
+    expect(fitted([0, 100], [3, 1], 0).largestResidual).toBe(1);
+    expect(fitted([0, 100], [1, 3], 0).largestResidual).toBe(-1);
+  });
+
+  it("of order 10 finds ten zeros and their sign again", () => {
+    const at = Array.from({ length: 12 }, (_, i) => i / 2 - 2.75);
+    // Chebyshev's T10(t/3) = cos(10 arccos(t/3)), of leading coefficient 2⁹/3¹⁰.
+    const fit = fitted(
+      at,
+      at.map((x) => Math.cos(10 * Math.acos(x / 3))),
+      10,
+    );
+    expect((fit.coefficients[10] as number) / (2 ** 9 / 3 ** 10)).toBeCloseTo(1, 9);
+  });
+
+  it("keeps to its digits in proportion to the deviations: a million times larger ones are fitted as well", () => {
+    const at = Array.from({ length: 12 }, (_, i) => 900 + 20 * i);
+    const jagged = at.map((_, i) => (i % 3) - 1);
+    const small = fitted(at, jagged, 6);
+    const large = fitted(
+      at,
+      jagged.map((y) => y * 2 ** 20),
+      6,
+    );
+    expect(large.coefficients).toEqual(small.coefficients.map((c) => c * 2 ** 20));
   });
 
   it("through as many points as coefficients has no scatter to judge by", () => {
@@ -76,7 +112,7 @@ describe("a deviation function", () => {
     expect(fit.coefficients).toEqual([1, 0.01]);
     expect(fit.dof).toBe(0);
     for (const none of [fit.uncertainties, fit.covariance, fit.residualSd])
-      expect(none).toBeInstanceOf(Refusal);
+      expect(message(none)).toBe("as many coefficients as points: no degrees of freedom are left");
     const known = fitted([0, 100], [1, 2], 1, { uncertainties: [0.5, 0.5] });
     expect((known.uncertainties as number[])[0]).toBeCloseTo(0.5, 14);
     expect(known.reducedChi2).toBeInstanceOf(Refusal);
@@ -112,10 +148,12 @@ describe("a deviation function", () => {
     expect(message(fitDeviation([1, 2], [1, 2], 0, { uncertainties: [1, 0] }))).toBe(
       "uncertainty of point 2 is 0 or an empty cell",
     );
-    expect(message(fitDeviation([1, 2], [1, 2], 0, { uncertainties: [-1, 1] }))).toContain(
-      "-1 µV, not above 0",
+    expect(message(fitDeviation([1, 2], [1, 2], 0, { uncertainties: [-1, 1] }))).toBe(
+      "uncertainty of point 1 is -1 µV, not above 0",
     );
-    expect(message(fitDeviation([1, 2], [1, 2], 0, { uncertainties: [1] }))).toContain("differ in number");
+    expect(message(fitDeviation([1, 2], [1, 2], 0, { uncertainties: [1] }))).toBe(
+      "points and uncertainties differ in number, 2 and 1",
+    );
     expect(message(fitDeviation([1, 2], [1], 0))).toContain("points and deviations differ in number");
     expect(fitDeviation([], [], 0)).toBeInstanceOf(Refusal);
   });
@@ -126,10 +164,14 @@ describe("a deviation function", () => {
     expect(message(fitDeviation(narrow, jagged, 9))).toBe(
       "order 9 from 1000 °C to 1000.14 °C cannot be written in powers of °C: take a lower order",
     );
+    // Where 0 °C is among the points, that one keeps its digits, but it is not enough.
+    expect(message(fitDeviation([0, ...narrow], [0, ...jagged], 9))).toContain("cannot be written");
   });
 
   it("refuses numbers that are too large instead of giving infinities", () => {
-    expect(fitDeviation([1, 2, 3], [1e308, -1e308, 1e308], 1)).toBeInstanceOf(Refusal);
-    expect(fitDeviation([1, 2, 3], [1e200, -1e200, 1e200], 1)).toBeInstanceOf(Refusal);
+    expect(message(fitDeviation([1, 2, 3], [1e308, -1e308, 1e308], 1))).toBe(
+      "the deviations do not determine a function of order 1",
+    );
+    expect(message(fitDeviation([1, 2, 3], [1e200, -1e200, 1e200], 1))).toBe("the deviations are too large");
   });
 });

@@ -52,6 +52,22 @@ describe("drift of two calibrations", () => {
     expect(message(slow[0]?.leavesLimitOn)).toContain("before the year 10000");
   });
 
+  it("names the last day that a worksheet knows, 9999-12-31", () => {
+    const leaving = (limit: number) =>
+      calibrationDrift([100], { date: 0, values: [-1] }, { date: 1, values: [0] }, [limit]) as PointDrift[];
+    // One degree a day from day 1 on.
+    expect(leaving(2_958_464)[0]?.leavesLimitOn).toBe(2_958_465);
+    expect(message(leaving(2_958_465)[0]?.leavesLimitOn)).toBe(
+      "at this drift it does not leave its limit before the year 10000",
+    );
+  });
+
+  it("is refused as a whole where one rate of several is infinite", () => {
+    expect(
+      message(calibrationDrift([1, 2], { date: 0, values: [0, 0] }, { date: 1, values: [1, 1e308] })),
+    ).toBe("the drift per year is too large");
+  });
+
   it("never gives an infinite rate", () => {
     expect(message(calibrationDrift([1], { date: 0, values: [1] }, { date: 5e-324, values: [2] }))).toBe(
       "the drift per year is too large",
@@ -60,6 +76,12 @@ describe("drift of two calibrations", () => {
 
   it("is refused for dates in the wrong order, bad points and bad limits", () => {
     expect(message(calibrationDrift(points, second, first))).toBe("the second date is not after the first");
+    expect(message(calibrationDrift(points, first, { ...second, date: first.date }))).toBe(
+      "the second date is not after the first",
+    );
+    expect(message(calibrationDrift(points, first, { ...second, values: [1] }))).toBe(
+      "points and second values differ in number, 3 and 1",
+    );
     expect(message(calibrationDrift([200, 600, 0], first, second))).toContain(
       "point 3 is 0 °C (0 or an empty cell)",
     );

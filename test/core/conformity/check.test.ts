@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { Refusal, temperatureUnits } from "../../../src/core";
+import { type Refusal, temperatureUnits } from "../../../src/core";
 import {
   type CheckRow,
   checkTable,
@@ -47,6 +47,7 @@ describe("classMet", () => {
     expect(message(classMet([1, 2], [1], "K"))).toBe("2 temperatures for 1 errors");
     expect(message(classMet([], [], "K"))).toBe("no points to judge");
     expect(message(classMet([1], [1], "A", "ASTM"))).toBe("ASTM has no tolerance class for type A");
+    expect(message(classMet([1], [1], "Au/Pt"))).toBe("IEC has no tolerance class for Au/Pt");
   });
 });
 
@@ -127,7 +128,8 @@ describe("checkTable", () => {
       checkTable({ references: [Number.NaN, Number.NaN], readings: [[100, Number.NaN]], limits: class2 }),
     );
     expect(message(table[0]?.verdict)).toBe("reference temperature missing");
-    expect(table[1]?.verdict).toBe("");
+    expect(table[0]?.reference).toBe("");
+    expect(Object.values(table[1] as CheckRow)).toEqual(["1", "", "", "", "", "", ""]);
   });
 
   it("spoils only the rows outside the class", () => {
@@ -153,7 +155,21 @@ describe("checkTable", () => {
     expect(message(checkTable({ references: [1], readings: [[1]], limits: 1, uncertainty: [] }))).toBe(
       "expanded uncertainties: 0 for 1 reference temperatures",
     );
-    expect(message(checkTable({ references: [], readings: [], limits: 1 }))).toBe("no readings to check");
+    for (const [references, readings] of [
+      [[], []],
+      [[], [[]]],
+      [[1], []],
+    ] as const) {
+      expect(message(checkTable({ references, readings, limits: 1 }))).toBe("no readings to check");
+    }
+  });
+
+  it("refuses an error or a share of the limit that is no number", () => {
+    const [far] = rows(checkTable({ references: [-1e308], readings: [[1e308]], limits: 1 }));
+    expect(message(far?.error)).toBe("error is too large for a number");
+    const [fine] = rows(checkTable({ references: [0], readings: [[1e300]], limits: 1e-300 }));
+    expect(message(fine?.used)).toBe("used share is too large for a number");
+    expect(fine?.verdict).toBe("Fail");
   });
 
   it("refuses a limit or an uncertainty of 0 in its row", () => {
@@ -203,6 +219,16 @@ describe("statement", () => {
       "Conditional fail: the error of 2.5 °C exceeds the limit of ±2.2 °C, by no more than the guard band.",
     ],
     [2.5, "simple", "Fail: the error of 2.5 °C exceeds the limit of ±2.2 °C."],
+    [
+      -2.2,
+      "guarded",
+      "Fail: the error of -2.2 °C lies within the limit of ±2.2 °C, but not within the acceptance limit of ±1.7 °C.",
+    ],
+    [
+      -1.7,
+      "guarded",
+      "Pass: the error of -1.7 °C lies within the acceptance limit of ±1.7 °C, the limit of ±2.2 °C less the guard band.",
+    ],
   ])("an error of %d under the rule %s", (error, name, start) => {
     expect(sentence(error, 2.2, 0.5, rule(name)).startsWith(start)).toBe(true);
   });
@@ -230,6 +256,10 @@ describe("statement", () => {
   it("refuses what cannot be stated", () => {
     expect(message(statement(1, 2, 0))).toBe("expanded uncertainty is 0 or an empty cell");
     expect(message(statement(1, 2, 1, rule("guarded"), 0))).toBe("coverage factor is 0 or an empty cell");
-    expect(statement(1, -2, 1)).toBeInstanceOf(Refusal);
+    const inFahrenheit = (...given: Parameters<typeof statement>): string =>
+      (statement(...given) as Refusal).message(fahrenheit);
+    expect(inFahrenheit(1, -2, 1)).toBe("limit -3.6 °F is below 0");
+    expect(inFahrenheit(1, 2, -1)).toBe("expanded uncertainty -1.8 °F is below 0");
+    expect(message(statement(1, 2, 1e308, rule("guarded 3")))).toBe("guard band is too large for a number");
   });
 });

@@ -16,6 +16,7 @@ import {
   tolerance,
   toleranceClass,
   toleranceClassesOf,
+  toleranceClassNames,
   toleranceUv,
 } from "../../../src/core/conformity";
 import { astmE230Cables } from "../../../src/core/conformity/cables/astm-e230";
@@ -59,6 +60,25 @@ describe("the tolerance tables", () => {
             expect(constant).toBe(parts[i - 1]?.constant);
           });
         }
+      }
+    }
+  });
+
+  it("give every class to the sensors of one standard only", () => {
+    for (const name of toleranceClassNames) {
+      const homes = tables.filter(({ sensors }) =>
+        Object.values(sensors).some(({ classes }) => classes[name] !== undefined),
+      );
+      expect(homes).toHaveLength(1);
+    }
+  });
+
+  it("let every cable lie inside the reference function of its couple", () => {
+    for (const { cables } of [iec60584_3, astmE230Cables]) {
+      for (const cable of Object.values(cables)) {
+        expect(cable.from).toBeGreaterThanOrEqual(couple(cable.couple).low);
+        expect(cable.to).toBeLessThanOrEqual(couple(cable.couple).high);
+        expect(couple(cable.couple).seebeck(cable.to)).toBeGreaterThan(0);
       }
     }
   });
@@ -111,10 +131,33 @@ describe("tolerance", () => {
     expect(outside.message()).toBe("temperature 1050 °C is outside class 1 of type K, -40 °C to 1000 °C");
   });
 
-  it.each(["", "4", "class", "constructor", "standart"])('refuses the class "%s" as unknown', (name) => {
-    const unknown = refusal(tolerance("K", name, 20));
-    expect(unknown.kind).toBe("wrong kind");
-    expect(unknown.message()).toContain("1, 2, 3, standard, special, AA, A, B, C");
+  it.each(["", "4", "class", "constructor", "standart", "A class A", "class class 1"])(
+    'refuses the class "%s" as unknown',
+    (name) => {
+      const unknown = refusal(tolerance("K", name, 20));
+      expect(unknown.kind).toBe("wrong kind");
+      expect(unknown.message()).toBe(
+        `tolerance class "${name}" is unknown: 1, 2, 3, standard, special, AA, A, B, C`,
+      );
+    },
+  );
+
+  it("repeats no more of an unknown class than a message can bear", () => {
+    expect(refusal(tolerance("K", `  ${"x".repeat(40)} `, 20)).message()).toBe(
+      `tolerance class "${"x".repeat(30)}" is unknown: 1, 2, 3, standard, special, AA, A, B, C`,
+    );
+  });
+
+  it("calls a letter a type, with its number where it has one, and conductors by themselves", () => {
+    for (const [name, words] of [
+      ["A-2", "type A-2"],
+      ["Mo/W", "Mo/W"],
+      ["W/W26Re", "W/W26Re"],
+    ] as const) {
+      expect(refusal(tolerance(name, "1", 20)).message()).toBe(
+        `no tolerance class is published for ${words}`,
+      );
+    }
   });
 
   it("gives the class itself, to be asked again and again", () => {
@@ -126,6 +169,12 @@ describe("tolerance", () => {
 });
 
 describe("toleranceUv", () => {
+  it("takes a temperature past the end of class and function, by rounding, as that end", () => {
+    const c = couple("C");
+    expect(toleranceUv(c, "standard", 2315 + 4e-10)).toBeCloseTo(23.15 * 1000 * c.seebeck(2315), 6);
+    expect(toleranceUv(c, "standard", -4e-10)).toBeCloseTo(4.4 * 1000 * c.seebeck(0), 6);
+  });
+
   it("is the limit in degrees times the Seebeck coefficient", () => {
     // Type K at 1000 °C: 38.98 µV/°C by the published tables (41.276 mV at 1000 °C, 41.315 mV at 1001 °C).
     expect(toleranceUv(couple("K"), "1", 1000)).toBeCloseTo(4 * 38.98, 0);
@@ -172,8 +221,16 @@ describe("cable tolerances", () => {
     );
     // Printed tables of type K: 2.023 mV at 50 °C, 2.064 mV at 51 °C.
     expect(cableToleranceUv("KX", "special", 50)).toBeCloseTo(1.1 * 41, 0);
-    refusal(cableToleranceUv("KX", "special", 201));
-    refusal(cableToleranceDegrees("KX", "special", 900));
+    // ... 8.138 mV at 200 °C, 8.178 mV at 201 °C.
+    expect(cableToleranceUv("KX", "special", 200)).toBeCloseTo(1.1 * 40, 0);
+    for (const t of [201, -1]) {
+      expect(refusal(cableToleranceUv("KX", "special", t)).message()).toBe(
+        `temperature of the head ${t} °C is outside the range of KX, 0 °C to 200 °C`,
+      );
+    }
+    expect(refusal(cableToleranceDegrees("KX", "special", 900)).message()).toBe(
+      "KX is specified in degrees of its own junctions, not in µV: leave the temperature out",
+    );
   });
 
   it("say what a cable has", () => {
@@ -183,15 +240,31 @@ describe("cable tolerances", () => {
     expect(refusal(cableToleranceUv("SX", "special")).message()).toBe(
       "SX has no class special: it has class standard",
     );
+    expect(refusal(cableToleranceUv("KCA", "special")).message()).toBe(
+      "KCA has no class special: it has class 2",
+    );
+    expect(refusal(cableToleranceUv("KX", "C")).message()).toBe(
+      'tolerance class "C" is unknown: 1, 2, standard, special',
+    );
+    expect(refusal(cableToleranceUv("BX", "1")).message()).toBe("BX has no class 1: it has class standard");
+    expect(refusal(cableToleranceUv("JX", "AA")).kind).toBe("wrong kind");
     expect(refusal(cableToleranceUv("KX", "3")).kind).toBe("wrong kind");
-    const unknown = refusal(cableToleranceUv("QX", "1"));
+    const unknown = refusal(
+      cableToleranceUv("  QX of a very long name, longer than a message should repeat", "1"),
+    );
     expect(unknown.kind).toBe("wrong kind");
-    expect(unknown.message()).toContain("JX TX EX KX NX");
+    expect(unknown.message()).toBe(
+      `cable "QX of a very long name, longer" is unknown: ${cableDesignations.join(" ")}`,
+    );
   });
 
   it("in degrees are refused where the couple gives no EMF, or beyond its range", () => {
-    refusal(cableToleranceDegrees("BC", "2", 10));
-    refusal(cableToleranceDegrees("BC", "2", 1900));
+    expect(refusal(cableToleranceDegrees("BX", "standard", 10)).message()).toBe(
+      "33 µV is no temperature at 10 °C: type B hardly gives EMF there",
+    );
+    expect(refusal(cableToleranceDegrees("BX", "standard", 1900)).message()).toBe(
+      "temperature 1900 °C is outside the range of type B, 0 °C to 1820 °C",
+    );
   });
 
   it("are a number above 0 or a refusal for every cable, class and temperature", () => {

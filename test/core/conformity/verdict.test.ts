@@ -33,11 +33,19 @@ describe("decisionRule", () => {
     "simple 1",
     "guarded 1e5",
     "guarded 0.83 U",
-    "guarded 0",
+    `guarded ${"9".repeat(400)}`,
+    `  ${"x".repeat(40)} `,
   ])('refuses "%s"', (text) => {
     const refused = decisionRule(text) as Refusal;
     expect(refused.kind).toBe("wrong kind");
-    expect(refused.message()).not.toMatch(/NaN|undefined/);
+    expect(refused.message()).toBe(
+      `rule "${text.trim().slice(0, 30)}" is unknown: simple, guarded, conditional, or such as guarded 0.83`,
+    );
+  });
+
+  it("refuses a guard band of nothing, which has a name of its own", () => {
+    expect((decisionRule("guarded 0") as Refusal).kind).toBe("wrong kind");
+    expect(message(decisionRule("conditional 0.0"))).toBe('a guard band of 0 × U is the rule "simple"');
   });
 });
 
@@ -104,6 +112,16 @@ describe("acceptanceLimit", () => {
     expect(acceptanceLimit(0.3, 0.1 + 0.2)).toBe(0);
   });
 
+  it("leaves zero, a verdict and a risk where U exceeds the limit by less than the ninth decimal", () => {
+    const u = 1 + 4e-10;
+    expect(verdict(0, 1, u)).toBe("Pass");
+    expect(acceptanceLimit(1, u)).toBe(0);
+    expect(largestPassRisk(1, u, rule("guarded"), 2)).toBeCloseTo(2 * 0.02275013194817921, 9);
+    expect(verdict(0, 1, 1 + 6e-10)).toBe("Fail");
+    expect(acceptanceLimit(1, 1 + 6e-10)).toBeInstanceOf(Refusal);
+    expect(largestPassRisk(1, 1 + 6e-10, rule("guarded"), 2)).toBeInstanceOf(Refusal);
+  });
+
   it("refuses when nothing is left", () => {
     expect(message(acceptanceLimit(2.2, 3))).toBe("U exceeds the limit: 3 is more than 2.2");
     expect(message(acceptanceLimit(2.2, 2, rule("guarded 1.5")))).toBe(
@@ -141,7 +159,25 @@ describe("largestPassRisk", () => {
   });
 
   it("refuses where nothing can pass", () => {
-    expect(largestPassRisk(1, 1.5, rule("guarded"), 2)).toBeInstanceOf(Refusal);
+    expect(message(largestPassRisk(1, 1.5, rule("guarded"), 2))).toBe(
+      "the guard band leaves nothing to pass",
+    );
+    // 0.5 to 2 with a band of 0.75 on either side: 1.25 alone passes, and with 0.76 nothing.
+    expect(largestPassRisk(2, 0.75, rule("guarded"), 2, 0.5)).toBeCloseTo(2 * 0.02275013194817921, 12);
+    expect(largestPassRisk(2, 0.76, rule("guarded"), 2, 0.5)).toBeInstanceOf(Refusal);
+  });
+
+  it("refuses an uncertainty or a coverage factor that is not above 0, and a band that is no number", () => {
+    expect(message(largestPassRisk(1, 0, rule("guarded"), 2))).toBe(
+      "expanded uncertainty is 0 or an empty cell",
+    );
+    expect(message(largestPassRisk(1, 1, rule("guarded"), -2))).toBe("coverage factor -2 is below 0");
+    expect(message(largestPassRisk(1, 1e308, rule("guarded 3"), 2))).toBe(
+      "guard band is too large for a number",
+    );
+    expect(message(largestPassRisk(1, 1, rule("guarded"), 2, 3))).toBe(
+      "lower limit 3 is above the upper limit 1",
+    );
   });
 });
 
@@ -154,5 +190,6 @@ describe("enScore", () => {
   it("refuses an uncertainty of 0, naming which", () => {
     expect(message(enScore(1, 0, 1, 1))).toBe("expanded uncertainty is 0 or an empty cell");
     expect(message(enScore(1, 1, 1, 0))).toBe("reference uncertainty is 0 or an empty cell");
+    expect(message(enScore(1e308, 1, -1e308, 1))).toBe("En number is too large for a number");
   });
 });

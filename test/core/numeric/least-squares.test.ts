@@ -55,9 +55,38 @@ describe("fitPolynomial", () => {
     expect(fitPolynomial([1, 1, 2], [1, 2, 3], 2)).toBeUndefined();
     expect(fitPolynomial([0, 0, 5], [1, 2, 3], 2, { throughZero: true })).toBeUndefined();
     expect(fitPolynomial([1], [1], 0, { throughZero: true })).toBeUndefined();
+    // Thirds and sevenths, so that rounding leaves something where exact numbers leave zero.
+    const two = [1 / 3, 1 / 3, 5 / 7, 5 / 7, 1 / 3];
+    expect(fitPolynomial(two, [1, 2, 4, 5, 3], 1)).toBeDefined();
+    for (const order of [2, 3, 4]) expect(fitPolynomial(two, [1, 2, 4, 5, 3], order)).toBeUndefined();
+  });
+
+  it("at a single place is the mean", () => {
+    const fit = fitted([5, 5], [2, 4], 0);
+    expect(fit.coefficients).toEqual([3]);
+    expect(fit.residuals).toEqual([-1, 1]);
+    expect(fit.value(5)).toBe(3);
+  });
+
+  it("has coefficients in proportion to the unit of x, however large or small that makes it", () => {
+    const xs = [1, 2, 3, 5, 7, 8, 9, 12];
+    const ys = [3, -1, 4, 1, -5, 9, 2, -6];
+    const { coefficients } = fitted(xs, ys, 6);
+    for (const power of [-60, 60, 100]) {
+      const unit = 2 ** power;
+      const scaled = fitted(
+        xs.map((x) => x * unit),
+        ys,
+        6,
+      );
+      scaled.coefficients.forEach((c, j) => {
+        expect((c * unit ** j) / (coefficients[j] as number)).toBeCloseTo(1, 12);
+      });
+    }
   });
 
   it("gives nothing rather than infinities", () => {
+    expect(fitPolynomial([-1.7e308, 0, 1.7e308], [1, 2, 3], 1)).toBeUndefined();
     expect(fitPolynomial([1, 2, 3], [1e308, -1e308, 1e308], 1)).toBeUndefined();
   });
 });

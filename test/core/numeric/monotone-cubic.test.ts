@@ -34,6 +34,27 @@ describe("the shape-preserving cubic", () => {
     expect(slopes[2]).toBeCloseTo(1 / 4, 14);
   });
 
+  it("weighs the chord over the shorter interval more, on whichever side it lies", () => {
+    // Widths 2 and 1, chords 2 and 1: weights 2 + 2·1 and 2·2 + 1, 9/(4/2 + 5/1) = 9/7.
+    expect(monotoneSlopes(Float64Array.of(0, 2, 3), Float64Array.of(0, 4, 5))[1]).toBeCloseTo(9 / 7, 14);
+  });
+
+  it("is held back at an end: to 0 where the parabola would start the wrong way, to three chords where it is too steep", () => {
+    // (3·1 − 5)/2 = −1 against a chord of 1; (3·1 + 9)/2 = 6 against 3.
+    const starts = (...ys: number[]): number =>
+      monotoneSlopes(Float64Array.of(0, 1, 2), Float64Array.from(ys))[0] as number;
+    expect(starts(0, 1, 6)).toBe(0);
+    expect(starts(0, 1, -8)).toBe(3);
+    expect(starts(0, -1, 8)).toBe(-3);
+    // (3·1 + 3)/2 = 3 is just allowed, and (3·1 + 1)/2 = 2 anyhow.
+    expect(starts(0, 1, -2)).toBe(3);
+    expect(starts(0, 1, 0)).toBe(2);
+    expect(starts(0, 0, 5)).toBe(0);
+    const ends = monotoneSlopes(Float64Array.of(0, 1, 2), Float64Array.of(0, 10, 8));
+    // (3·(−2) − 10)/2 = −8 against a chord of −2.
+    expect(ends[2]).toBe(-6);
+  });
+
   it("joins its pieces with one slope", () => {
     const f = curve([0, 1, 4, 5, 9], [0, 2, 5, 5.1, 4]);
     const h = 1e-6;

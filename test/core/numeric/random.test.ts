@@ -2,6 +2,53 @@ import { describe, expect, it } from "vitest";
 import { normalDeviates } from "../../../src/core/numeric/normal-deviates";
 import { stateFromSeed, xoshiro128 } from "../../../src/core/numeric/xoshiro128";
 
+describe("a seeded state", () => {
+  it("is that of the two first numbers of SplitMix64 (for seed 1234567, from memory)", () => {
+    const state = stateFromSeed(1_234_567).map((word) => BigInt.asUintN(32, BigInt(word)));
+    const [low = 0n, high = 0n, secondLow = 0n, secondHigh = 0n] = state;
+    expect((high << 32n) | low).toBe(6_457_827_717_110_365_317n);
+    expect((secondHigh << 32n) | secondLow).toBe(3_203_168_211_198_807_973n);
+  });
+
+  it("is never all zeros, and differs in every word between neighbouring seeds", () => {
+    const words = Array.from({ length: 50 }, (_, seed) => stateFromSeed(seed));
+    for (let place = 0; place < 4; place++) {
+      expect(new Set(words.map((state) => state[place])).size).toBe(50);
+    }
+  });
+});
+
+describe("the polar method", () => {
+  /** Gives these uniform numbers of −1 … 1, each as two words of 32 bits. */
+  const bitsOf = (...uniforms: number[]): (() => number) => {
+    const words = uniforms.flatMap((u) => {
+      const whole = (u + 1) * 2 ** 52;
+      return [Math.floor(whole / 2 ** 21), (whole % 2 ** 21) * 2 ** 11];
+    });
+    return () => words.shift() as number;
+  };
+
+  it("makes two deviates of two uniform numbers: x·√(−2 ln s/s) and y·√(−2 ln s/s), s = x² + y²", () => {
+    const scale = Math.sqrt((-2 * Math.log(0.3125)) / 0.3125);
+    const deviate = normalDeviates(bitsOf(0.5, -0.25, 0.25, 0.5));
+    expect([deviate(), deviate(), deviate(), deviate()]).toEqual(
+      [0.5, -0.25, 0.25, 0.5].map((u) => u * scale),
+    );
+  });
+
+  it("throws away points outside the circle, on it, and at its centre", () => {
+    const scale = Math.sqrt((-2 * Math.log(0.3125)) / 0.3125);
+    const deviate = normalDeviates(bitsOf(0.75, 0.75, -1, 0, 0, 0, 0.5, 0.25));
+    expect([deviate(), deviate()]).toEqual([0.5 * scale, 0.25 * scale]);
+  });
+
+  it("uses all 53 bits of a uniform number", () => {
+    const least = 2 ** -52;
+    const square = least * least + 0.25;
+    expect(normalDeviates(bitsOf(least, 0.5))()).toBe(least * Math.sqrt((-2 * Math.log(square)) / square));
+  });
+});
+
 describe("normal deviates", () => {
   const count = 1_000_000;
   const deviate = normalDeviates(xoshiro128(stateFromSeed(12)));

@@ -22,6 +22,17 @@ describe("toNinthDecimal", () => {
 });
 
 describe("decimal rounding", () => {
+  it("takes a number apart into 15 digits, their place and a sign that zero has not", () => {
+    expect(decimal(-12.5)).toEqual({
+      negative: true,
+      digits: 125_000_000_000_000n,
+      lastPlace: -13,
+      leadingPlace: 1,
+    });
+    expect(decimal(0).negative).toBe(false);
+    expect(decimal(-0).negative).toBe(false);
+  });
+
   const rounded = (value: number, place: number): string => {
     const exact = decimal(value);
     return plainDecimal(roundedTo(exact, place), place, exact.negative);

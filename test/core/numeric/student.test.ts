@@ -24,6 +24,16 @@ describe("Student's t distribution", () => {
     }
   });
 
+  /** Computed with 40 digits of working precision by an independent library (mpmath), for the doubles next to these. */
+  it.each([
+    [1000, 0.5, 0.6747351646070094],
+    [1000, 0.95, 1.962339080826408],
+    [1200, 0.99, 2.5799325688329544],
+    [3000, 0.9545, 2.0008361202658853],
+  ])("with %d degrees of freedom, where the expansion begins, is right to 14 digits at %d", (dof, p, t) => {
+    expect(Math.abs(studentTwoSided(p, dof) / t - 1)).toBeLessThan(8e-15);
+  });
+
   it("falls with the degrees of freedom, across the change of method too", () => {
     for (const p of INSIDES) {
       let before = Number.POSITIVE_INFINITY;
