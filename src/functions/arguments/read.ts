@@ -24,7 +24,7 @@ export const inWords = (name: string): string =>
   IN_WORDS[name] ??
   name
     .replace(/([a-z])([A-Z])/g, (_, before: string, after: string) => `${before} ${after.toLowerCase()}`)
-    .replace(/^emf\b/, "EMF");
+    .replace(/emf\b/, "EMF");
 
 /** Reads one argument for the whole call. */
 export function readGiven<T>(

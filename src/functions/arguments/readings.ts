@@ -8,6 +8,9 @@ import type { Argument } from "./argument";
 /** No thermometer reads so much, and squares of it would leave the range of numbers. */
 const BEYOND_ANY_READING = 1e100;
 
+const isReading = (cell: unknown): cell is number =>
+  typeof cell === "number" && Math.abs(cell) < BEYOND_ANY_READING;
+
 export class Readings {
   constructor(
     /** In core units, one column per sensor; NaN where a reading is missing. */
@@ -32,9 +35,10 @@ export class Readings {
     const reading = readCell(this.cells[row]?.[column]);
     if (reading.kind === "blank") return "";
     if (reading.kind === "error") return reading.error;
-    const value = this.kind.read(reading.value, this.label, this.unit);
-    if (value instanceof Refusal) return value;
-    return Math.abs(value) < BEYOND_ANY_READING ? undefined : noAnswer`${this.label}: ${value} is no reading`;
+    const read = this.kind.read(reading.value, this.label, this.unit);
+    if (read instanceof Refusal) return read;
+    const { value } = reading;
+    return isReading(value) ? undefined : noAnswer`${this.label}: ${String(value)} is no reading`;
   }
 }
 
@@ -50,10 +54,7 @@ export const readings = (kind: NumberKind): Argument<Readings, "block", false> =
       const cells = given[row] as readonly unknown[];
       for (let column = 0; column < columns.length; column++) {
         const cell = cells[column];
-        (columns[column] as Float64Array)[row] =
-          typeof cell === "number" && Math.abs(cell) < BEYOND_ANY_READING
-            ? (cell - zero) * factor
-            : Number.NaN;
+        (columns[column] as Float64Array)[row] = isReading(cell) ? (cell - zero) * factor : Number.NaN;
       }
     }
     return new Readings(columns, label, given, kind, unit);
