@@ -2,7 +2,7 @@
 import { celsius, Refusal, type TemperatureUnit } from "../../core";
 import { type CellError, error } from "../cell";
 import { failure } from "../failure";
-import { asMatrix, columnsOf, rowsOf } from "../matrix";
+import { asMatrix, columnsOf } from "../matrix";
 import type { Argument, Arguments } from "./argument";
 
 /** A function without the argument works in whatever degrees the sheet holds, and its messages do not say which. */
@@ -38,8 +38,7 @@ export function readGiven<T>(
   }
   const matrix = asMatrix(given);
   const label = inWords(name);
-  if (rowsOf(matrix) === 0 || columnsOf(matrix) === 0)
-    return error("#VALUE!", `${label}: the range is empty`);
+  if (columnsOf(matrix) === 0) return error("#VALUE!", `${label}: the range is empty`);
   const value = argument.read(matrix, label, unit);
   return value instanceof Refusal ? failure(value, unit) : value;
 }
