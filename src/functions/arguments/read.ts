@@ -12,6 +12,7 @@ export const isLeftOut = (given: unknown): boolean => given === null || given ==
 
 /** Names that read badly when they are only taken apart. */
 const IN_WORDS: Readonly<Record<string, string>> = {
+  deviationsUv: "deviations",
   lower: "lower limit",
   upper: "upper limit",
   uEmfUv: "uncertainty of the EMF",
