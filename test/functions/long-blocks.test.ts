@@ -1,11 +1,19 @@
 /** Where only numbers vary, blocks of rows go through the column routine at once, and only bad cells are worked out one by one. */
 import { beforeEach, describe, expect, it } from "vitest";
-import { each, ifGiven, once, orElse, unit } from "../../src/functions/arguments";
+import { each, ifGiven, ifGivenOrBlank, once, orElse, unit } from "../../src/functions/arguments";
 import { cellwise } from "../../src/functions/cellwise";
 import { couple } from "../../src/functions/kinds/couple";
+import type { Kind } from "../../src/functions/kinds/kind";
+import { name } from "../../src/functions/kinds/name";
 import { number } from "../../src/functions/kinds/numbers";
 import { temperature, temperatureDifference } from "../../src/functions/kinds/temperature";
-import { differenceResult, emfResult, type ResultKind, temperatureResult } from "../../src/functions/results";
+import {
+  differenceResult,
+  emfResult,
+  numberResult,
+  type ResultKind,
+  temperatureResult,
+} from "../../src/functions/results";
 import { columnOf, errorCell, one, readable, rowOf } from "./call";
 
 /** Cells that were worked out by themselves, and calls of the column routine. */
@@ -147,6 +155,75 @@ describe("cells are worked out one by one", () => {
     const result = plain(given({ reading: columnOf(1, 2), step: one(0), ...varied }));
     expect(blocks).toEqual([]);
     expect(result).toHaveLength(2);
+  });
+});
+
+describe("a word that repeats down a column", () => {
+  /** What was read by each kind, in order. */
+  const read: unknown[] = [];
+  const counted = <T>(kind: Kind<T>): Kind<T> => ({
+    ...kind,
+    read(cell, ...rest) {
+      read.push(cell);
+      return kind.read(cell, ...rest);
+    },
+  });
+  const paired = cellwise(() => [], {
+    arguments: {
+      value: each(counted(number)),
+      word: each(counted(name)),
+      note: ifGivenOrBlank(each(counted(name))),
+    },
+    result: numberResult,
+    cell: ({ value, word, note }) => `${value} ${word} ${note}`,
+  });
+  const shown = (values: unknown[][], words: unknown[][], notes?: unknown[][]) => {
+    read.length = 0;
+    return readable(paired({ value: values, word: words, note: notes })).flat();
+  };
+
+  it("is read once, and a good number not at all after the first row", () => {
+    expect(shown(columnOf(1, 2, 3, 4), columnOf("a", "a", "b", "b"), one("n"))).toEqual([
+      "1 a n",
+      "2 a n",
+      "3 b n",
+      "4 b n",
+    ]);
+    expect(read).toEqual([1, "a", "n", 3, "b", "n"]);
+  });
+
+  it("holds again after a blank, a bad cell and another word", () => {
+    expect(shown(columnOf(1, 2, 3, 4, 5), columnOf("a", "", "a", true, "a"))).toEqual([
+      "1 a undefined",
+      "#N/A word missing",
+      "3 a undefined",
+      "#VALUE! word: TRUE, not a name",
+      "5 a undefined",
+    ]);
+    expect(shown(columnOf(1, 2, 3, 4), one("a"), columnOf("n", "", "n", "n"))).toEqual([
+      "1 a n",
+      "2 a undefined",
+      "3 a n",
+      "4 a n",
+    ]);
+  });
+
+  it("is not met by a cell that holds nothing", () => {
+    expect(shown(columnOf(1, 2), columnOf(undefined, "a"))).toEqual(["#N/A word missing", "2 a undefined"]);
+    expect(shown(columnOf(1, 2), one("a"), columnOf(undefined, "n"))).toEqual(["1 a undefined", "2 a n"]);
+  });
+});
+
+describe("a text as a result", () => {
+  it("is written as it is, whatever numbers would be written in", () => {
+    const word = cellwise(() => [], {
+      arguments: { value: each(number), unit },
+      result: temperatureResult,
+      cell: ({ value }) => (value > 0 ? value : "none"),
+    });
+    expect(word({ value: columnOf(0, 100), unit: one("F") })).toEqual(
+      columnOf("none", expect.closeTo(212, 12)),
+    );
   });
 });
 
