@@ -20,7 +20,7 @@ import { columnOf, errorCell, one, readable, rowOf } from "./call";
 let alone: string[] = [];
 let blocks: { count: number; names: string[] }[] = [];
 
-type Given = Partial<Record<"reading" | "type" | "step" | "note" | "added" | "unit", unknown[][]>>;
+type Given = Partial<Record<"reading" | "type" | "step" | "note" | "word" | "added" | "unit", unknown[][]>>;
 
 /** An invented function, reading + 2·step + added, that keeps count of how it was asked. */
 const invented = (result: ResultKind) => {
@@ -30,6 +30,7 @@ const invented = (result: ResultKind) => {
       type: each(couple),
       step: orElse(each(temperatureDifference), 1000, "1000"),
       note: ifGiven(each(number)),
+      word: ifGiven(each(name)),
       added: orElse(once(number), 0, "0"),
       unit,
     },
@@ -49,7 +50,16 @@ const invented = (result: ResultKind) => {
   return (given: Given) => {
     alone = [];
     blocks = [];
-    return call({ reading: one(0), type: k, step: none, note: none, added: none, unit: none, ...given });
+    return call({
+      reading: one(0),
+      type: k,
+      step: none,
+      note: none,
+      word: none,
+      added: none,
+      unit: none,
+      ...given,
+    });
   };
 };
 const k = one("K");
@@ -144,6 +154,7 @@ describe("cells are worked out one by one", () => {
     ["types vary along a row", { type: rowOf("K", "J") }],
     ["the type is unknown", { type: one("X") }],
     ["the type is blank", { type: one("") }],
+    ["a word is blank that may be any", { word: one("") }],
     ["the type is an error", { type: one(errorCell("#N/A")) }],
   ])("where %s", (_, varied) => {
     const result = plain({ reading: columnOf(1, 2), step: one(0), ...varied });
@@ -229,6 +240,11 @@ describe("the call's unit", () => {
     expect(result[1]?.[0]).toBeCloseTo(20, 12);
     expect(plain({ reading: columnOf(273.15), step: one(1), unit: one("K") })).toEqual(one(2));
     expect(alone).toEqual([]);
+  });
+
+  it("does not hold for a result that is written in a way of its own", () => {
+    const mirrored = invented({ name: "mirrored", write: (value) => 5 - 4 * value });
+    expect(mirrored({ reading: columnOf(1, 0, 10), step: one(0) })).toEqual(columnOf(1, 5, -35));
   });
 
   it("holds for what comes out", () => {

@@ -124,6 +124,11 @@ describe("the declaration of a worksheet function", () => {
     expect(result).toMatchObject({ name: "EMF", unit: "mV" });
   });
 
+  it("says in which shape an argument comes, and that it must be given", () => {
+    expect(once(number)).toMatchObject({ shape: "once", optional: false });
+    expect(readings(number)).toMatchObject({ shape: "block", optional: false });
+  });
+
   it("is missed where there is none", () => {
     expect(() => declarationOf(() => [])).toThrow("a worksheet function without declared arguments");
   });

@@ -25,14 +25,18 @@ export class Readings {
     return this.cells.length;
   }
 
+  private cell(row: number, column: number): unknown {
+    return (this.cells[row] as readonly unknown[])[column];
+  }
+
   /** Whether a row holds a reading that cannot be an empty cell: those are 0 on the desktop. */
   isRead(row: number): boolean {
-    return this.columns.some((column, at) => !Number.isNaN(column[row]) && this.cells[row]?.[at] !== 0);
+    return this.columns.some((column, at) => !Number.isNaN(column[row]) && this.cell(row, at) !== 0);
   }
 
   /** What stands in the result of a cell that is no reading; undefined when it is one. */
   fault(row: number, column: number): "" | CellError | Refusal | undefined {
-    const reading = readCell(this.cells[row]?.[column]);
+    const reading = readCell(this.cell(row, column));
     if (reading.kind === "blank") return "";
     if (reading.kind === "error") return reading.error;
     const read = this.kind.read(reading.value, this.label, this.unit);
