@@ -14,10 +14,7 @@ export type Reading =
 const blank: Reading = { kind: "blank" };
 
 export const error = (code: "#VALUE!" | "#N/A", message: string): CellError =>
-  new CustomFunctions.Error(
-    code === "#N/A" ? CustomFunctions.ErrorCode.notAvailable : CustomFunctions.ErrorCode.invalidValue,
-    message,
-  );
+  new CustomFunctions.Error(code as CustomFunctions.ErrorCode, message);
 
 /** Rule 3: an error passes through unchanged where the platform lets it. */
 function passThrough(code: string, original: object): CellError {

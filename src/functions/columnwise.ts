@@ -3,7 +3,7 @@ import { noAnswer, Refusal } from "../core";
 import type { Arguments, Readings, Values } from "./arguments";
 import type { Declaration, WorksheetFunction } from "./declaration";
 import type { ResultKind } from "./results";
-import { type Entry, whole } from "./whole";
+import { type Entry, whole, written } from "./whole";
 
 /** One answer per reading, NaN where there is none; a log may end above the block's last row. */
 type Answers = Float64Array | readonly string[];
@@ -39,12 +39,10 @@ export function columnwise<const A extends Arguments>(
         const cells: Entry[] = [];
         for (let column = 0; column < columns.length; column++) {
           const answer = (columns[column] as Answers)[row];
-          if (typeof answer === "string") cells.push(answer);
-          else if (answer !== undefined && !Number.isNaN(answer)) cells.push(spec.result.write(answer, unit));
-          else {
+          if (answer === undefined || Number.isNaN(answer)) {
             const why = answer === undefined ? timeMissing : (spec.unanswered ?? timeMissing);
             cells.push(block.fault(row, column) ?? why);
-          }
+          } else cells.push(written(answer, spec.result, unit));
         }
         rows.push(cells);
       }

@@ -20,7 +20,7 @@ export function scans(times: Times, minutesPerUnit: number, readings: Readings):
     return wrongKind`times and ${readings.label} differ in rows, ${rows} and ${readings.rows}`;
   }
   const emptied = inSheet.findIndex((time, row) => time === 0 && (inSheet[row - 1] as number) > 0);
-  if (emptied >= 0) {
+  if (emptied !== -1) {
     // What a truly empty cell looks like on the desktop; or midnight, where a log has times of day.
     return wrongKind`time in row ${emptied + 1}: 0 or an empty cell; IF(ISBLANK(range),"",range) tells them apart, TIMELINE repairs midnight`;
   }

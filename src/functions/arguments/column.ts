@@ -57,19 +57,24 @@ export const gappedColumn = <T>(kind: Kind<T>): Argument<readonly (T | undefined
   },
 });
 
-/** A row or column without blanks. */
-export const column = <T>(kind: Kind<T>): Argument<readonly T[], "column", false> => ({
-  shape: "column",
-  kind,
-  optional: false,
-  read(given, label, unit) {
+/** Reads a row or column in which no cell may be blank. */
+export const withoutBlanks =
+  <T>(kind: Kind<T>) =>
+  (given: Matrix, label: string, unit: TemperatureUnit): Read<readonly T[]> => {
     const found = cellsInLine(given, label);
     if (found instanceof Refusal) return found;
     const values = readAll(found.cells, kind, found.name, unit);
     if (failed(values)) return values;
     const blank = values.indexOf(undefined);
     return blank < 0 ? (values as T[]) : wrongKind`${found.name(blank)}: the cell is blank`;
-  },
+  };
+
+/** A row or column without blanks. */
+export const column = <T>(kind: Kind<T>): Argument<readonly T[], "column", false> => ({
+  shape: "column",
+  kind,
+  optional: false,
+  read: withoutBlanks(kind),
 });
 
 /** A row or column without blanks that remembers which of the two it was. */
@@ -84,8 +89,8 @@ export const line = <T>(kind: Kind<T>): Argument<Line<T>, "column", false> => ({
   kind,
   optional: false,
   read(given, label, unit) {
-    const values = column(kind).read(given, label, unit);
-    return failed(values) ? values : { values, across: rowsOf(given) === 1 && columnsOf(given) > 1 };
+    const values = withoutBlanks(kind)(given, label, unit);
+    return failed(values) ? values : { values, across: columnsOf(given) > 1 };
   },
 });
 

@@ -1,7 +1,7 @@
 import type { Refusal, TemperatureUnit } from "../../core";
 import { type CellError, error, readCell } from "../cell";
 import type { Kind } from "../kinds/kind";
-import { columnsOf, type Matrix, rowsOf } from "../matrix";
+import { cellAt, columnsOf, type Matrix, rowsOf } from "../matrix";
 import type { Argument } from "./argument";
 
 const single =
@@ -10,7 +10,7 @@ const single =
     if (rowsOf(given) !== 1 || columnsOf(given) !== 1) {
       return error("#VALUE!", `${label}: one cell, not ${rowsOf(given)} × ${columnsOf(given)}`);
     }
-    const reading = readCell(given[0]?.[0]);
+    const reading = readCell(cellAt(given, 0, 0));
     if (reading.kind === "error") return reading.error;
     if (reading.kind === "blank") return error("#VALUE!", `${label}: the cell is blank`);
     return kind.read(reading.value, label, unit);
@@ -29,7 +29,9 @@ export const onceOrBlank = <T>(kind: Kind<T>): Argument<T | undefined, "once", f
   ...once<T | undefined>(kind),
   read(given, label, unit) {
     const alone = rowsOf(given) === 1 && columnsOf(given) === 1;
-    return alone && readCell(given[0]?.[0]).kind === "blank" ? undefined : single(kind)(given, label, unit);
+    return alone && readCell(cellAt(given, 0, 0)).kind === "blank"
+      ? undefined
+      : single(kind)(given, label, unit);
   },
 });
 

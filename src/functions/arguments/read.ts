@@ -2,7 +2,7 @@
 import { celsius, Refusal, type TemperatureUnit } from "../../core";
 import { type CellError, error } from "../cell";
 import { failure } from "../failure";
-import { asMatrix, columnsOf, rowsOf } from "../matrix";
+import { asMatrix, columnsOf } from "../matrix";
 import type { Argument, Arguments } from "./argument";
 
 /** A function without the argument works in whatever degrees the sheet holds, and its messages do not say which. */
@@ -12,6 +12,7 @@ export const isLeftOut = (given: unknown): boolean => given === null || given ==
 
 /** Names that read badly when they are only taken apart. */
 const IN_WORDS: Readonly<Record<string, string>> = {
+  deviationsUv: "deviations",
   lower: "lower limit",
   upper: "upper limit",
   uEmfUv: "uncertainty of the EMF",
@@ -24,7 +25,7 @@ export const inWords = (name: string): string =>
   IN_WORDS[name] ??
   name
     .replace(/([a-z])([A-Z])/g, (_, before: string, after: string) => `${before} ${after.toLowerCase()}`)
-    .replace(/^emf\b/, "EMF");
+    .replace(/emf\b/, "EMF");
 
 /** Reads one argument for the whole call. */
 export function readGiven<T>(
@@ -38,8 +39,7 @@ export function readGiven<T>(
   }
   const matrix = asMatrix(given);
   const label = inWords(name);
-  if (rowsOf(matrix) === 0 || columnsOf(matrix) === 0)
-    return error("#VALUE!", `${label}: the range is empty`);
+  if (columnsOf(matrix) === 0) return error("#VALUE!", `${label}: the range is empty`);
   const value = argument.read(matrix, label, unit);
   return value instanceof Refusal ? failure(value, unit) : value;
 }

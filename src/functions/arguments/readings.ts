@@ -8,6 +8,9 @@ import type { Argument } from "./argument";
 /** No thermometer reads so much, and squares of it would leave the range of numbers. */
 const BEYOND_ANY_READING = 1e100;
 
+const isReading = (cell: unknown): cell is number =>
+  typeof cell === "number" && Math.abs(cell) < BEYOND_ANY_READING;
+
 export class Readings {
   constructor(
     /** In core units, one column per sensor; NaN where a reading is missing. */
@@ -22,19 +25,24 @@ export class Readings {
     return this.cells.length;
   }
 
+  private cell(row: number, column: number): unknown {
+    return (this.cells[row] as readonly unknown[])[column];
+  }
+
   /** Whether a row holds a reading that cannot be an empty cell: those are 0 on the desktop. */
   isRead(row: number): boolean {
-    return this.columns.some((column, at) => !Number.isNaN(column[row]) && this.cells[row]?.[at] !== 0);
+    return this.columns.some((column, at) => !Number.isNaN(column[row]) && this.cell(row, at) !== 0);
   }
 
   /** What stands in the result of a cell that is no reading; undefined when it is one. */
   fault(row: number, column: number): "" | CellError | Refusal | undefined {
-    const reading = readCell(this.cells[row]?.[column]);
+    const reading = readCell(this.cell(row, column));
     if (reading.kind === "blank") return "";
     if (reading.kind === "error") return reading.error;
-    const value = this.kind.read(reading.value, this.label, this.unit);
-    if (value instanceof Refusal) return value;
-    return Math.abs(value) < BEYOND_ANY_READING ? undefined : noAnswer`${this.label}: ${value} is no reading`;
+    const read = this.kind.read(reading.value, this.label, this.unit);
+    if (read instanceof Refusal) return read;
+    const { value } = reading;
+    return isReading(value) ? undefined : noAnswer`${this.label}: ${String(value)} is no reading`;
   }
 }
 
@@ -50,10 +58,7 @@ export const readings = (kind: NumberKind): Argument<Readings, "block", false> =
       const cells = given[row] as readonly unknown[];
       for (let column = 0; column < columns.length; column++) {
         const cell = cells[column];
-        (columns[column] as Float64Array)[row] =
-          typeof cell === "number" && Math.abs(cell) < BEYOND_ANY_READING
-            ? (cell - zero) * factor
-            : Number.NaN;
+        (columns[column] as Float64Array)[row] = isReading(cell) ? (cell - zero) * factor : Number.NaN;
       }
     }
     return new Readings(columns, label, given, kind, unit);

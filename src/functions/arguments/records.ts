@@ -1,6 +1,6 @@
 /** Rows of differing cells as people type them: a name, a number, a word … */
 import { noAnswer, Refusal, type TemperatureUnit, wrongKind } from "../../core";
-import { type CellError, readCell } from "../cell";
+import { type CellError, type Reading, readCell } from "../cell";
 import { type Kind, shown } from "../kinds/kind";
 import { columnsOf, type Matrix } from "../matrix";
 import type { Argument } from "./argument";
@@ -72,7 +72,7 @@ function readRow(
     if (reading?.kind === "present") {
       const value = kind.read(reading.value, `${row}, ${words}`, unit);
       if (value instanceof Refusal) {
-        return index === 0 && isHeader(cells) ? value.and`; leave the header row out` : value;
+        return index === 0 && isHeader(readings) ? value.and`; leave the header row out` : value;
       }
       record[key] = value;
     } else if (!optional) {
@@ -89,5 +89,7 @@ function rowInWords([first]: readonly unknown[], index: number): string {
 }
 
 /** A row of words alone, without a digit, heads the columns. */
-const isHeader = (cells: readonly unknown[]): boolean =>
-  cells.every((cell) => typeof cell === "string" && !/\d/.test(cell));
+const isHeader = (cells: readonly Reading[]): boolean =>
+  cells.every(
+    (cell) => cell.kind !== "present" || (typeof cell.value === "string" && !/\d/.test(cell.value)),
+  );

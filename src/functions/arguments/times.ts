@@ -21,9 +21,9 @@ export const times: Argument<Times, "column", false> = {
     const inSheet = new Float64Array(given.length);
     let count = 0;
     for (let row = 0; row < given.length; row++) {
-      const cell = given[row]?.[0];
-      if (typeof cell === "number" && Number.isFinite(cell)) {
-        inSheet[row] = cell;
+      const [cell] = given[row] as readonly unknown[];
+      if (Number.isFinite(cell)) {
+        inSheet[row] = cell as number;
         count = row + 1;
         continue;
       }

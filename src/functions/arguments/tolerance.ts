@@ -2,7 +2,7 @@
 import { type Tolerance, wrongKind } from "../../core";
 import type { NumberKind } from "../kinds/kind";
 import type { Argument } from "./argument";
-import { column, failed } from "./column";
+import { failed, withoutBlanks } from "./column";
 
 /** Above and below the same, or below and above in two cells. That both are above 0 is the core's to say. */
 export const tolerance = (kind: NumberKind): Argument<Tolerance, "column", false> => ({
@@ -10,11 +10,11 @@ export const tolerance = (kind: NumberKind): Argument<Tolerance, "column", false
   kind,
   optional: false,
   read(given, label, unit) {
-    const values = column(kind).read(given, label, unit);
+    const values = withoutBlanks(kind)(given, label, unit);
     if (failed(values)) return values;
-    const [below, above = below, ...more] = values;
-    if (below === undefined || above === undefined || more.length > 0)
+    if (values.length > 2)
       return wrongKind`${label}: one number, or two cells (below, above), not ${values.length}`;
+    const [below, above = below] = values as readonly [number, number?];
     return { below, above };
   },
 });

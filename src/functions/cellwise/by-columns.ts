@@ -42,7 +42,7 @@ export function byColumns<A extends Arguments, P>(
     }
   }
   const answers = new Float64Array(BLOCK);
-  const result: Cell[][] = new Array(call.rows);
+  const result: Cell[][] = [];
   for (let top = 0; top < call.rows; top += BLOCK) {
     const count = Math.min(BLOCK, call.rows - top);
     for (let column = 0; column < call.columns; column++) {
@@ -67,7 +67,7 @@ function fill(
 ): void {
   const at = columnsOf(matrix) === 1 ? 0 : column;
   if (rowsOf(matrix) === 1) {
-    const cell = matrix[0]?.[at];
+    const cell = (matrix[0] as readonly unknown[])[at];
     buffer.fill(typeof cell === "number" ? cell : Number.NaN, 0, count);
   } else {
     for (let i = 0; i < count; i++) {

@@ -29,9 +29,8 @@ interface Ranged {
   readonly matrix: Matrix;
   /** For numbers: from the sheet to core units. */
   readonly scale: Scale | undefined;
-  /** The last word or number that was read and what it meant: a column of types or classes rarely changes. */
-  lastRaw: unknown;
-  lastValue: unknown;
+  /** The last word that was read, whose meaning `values` still holds: a column of types or classes rarely changes. */
+  lastRead: unknown;
 }
 
 export class Call<A extends Arguments, P> {
@@ -85,11 +84,9 @@ export class Call<A extends Arguments, P> {
     const { values } = this;
     for (const ranged of this.ranged) {
       const raw = cellAt(ranged.matrix, row, column);
-      if (typeof raw === "number" && ranged.scale !== undefined && Number.isFinite(raw)) {
-        values[ranged.name] = (raw - ranged.scale.zero) * ranged.scale.factor;
-      } else if (raw !== undefined && raw === ranged.lastRaw) {
-        values[ranged.name] = ranged.lastValue;
-      } else {
+      if (ranged.scale !== undefined && Number.isFinite(raw)) {
+        values[ranged.name] = ((raw as number) - ranged.scale.zero) * ranged.scale.factor;
+      } else if (raw === undefined || raw !== ranged.lastRead) {
         return this.careful(row, column);
       }
     }
@@ -100,10 +97,9 @@ export class Call<A extends Arguments, P> {
     if (argument.shape === "each" && !isLeftOut(given)) {
       const matrix = asMatrix(given);
       const label = inWords(name);
-      if (rowsOf(matrix) === 0 || columnsOf(matrix) === 0)
-        return error("#VALUE!", `${label}: the range is empty`);
+      if (columnsOf(matrix) === 0) return error("#VALUE!", `${label}: the range is empty`);
       const scale = isNumberKind(argument.kind) ? argument.kind.scale(this.unit) : undefined;
-      this.ranged.push({ name, label, argument, matrix, scale, lastRaw: undefined, lastValue: undefined });
+      this.ranged.push({ name, label, argument, matrix, scale, lastRead: undefined });
       return undefined;
     }
     const value = readGiven(name, argument, given, this.unit);
@@ -121,21 +117,19 @@ export class Call<A extends Arguments, P> {
     }
     for (const reading of readings) if (reading.kind === "error") return reading.error;
     // A blank reading gives a blank result; a blank beside a reading is something missing.
-    if (readings[0]?.kind === "blank") return "";
+    if ((readings[0] as Reading).kind === "blank") return "";
     for (const [index, ranged] of this.ranged.entries()) {
       const reading = readings[index] as Reading;
       if (reading.kind !== "present") {
         if (ranged.argument.blankIsNotGiven !== true) return error("#N/A", `${ranged.label} missing`);
         this.values[ranged.name] = undefined;
+        ranged.lastRead = undefined;
         continue;
       }
       const value = ranged.argument.kind.read(reading.value, ranged.label, this.unit);
       if (value instanceof Refusal) return failure(value, this.unit);
-      if (ranged.scale === undefined) {
-        ranged.lastRaw = reading.value;
-        ranged.lastValue = value;
-      }
       this.values[ranged.name] = value;
+      ranged.lastRead = reading.value;
     }
     return this.answer(row, column);
   }

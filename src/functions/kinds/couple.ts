@@ -23,9 +23,11 @@ function unknown(text: string): Refusal {
   return wrongKind`type "${shown(text)}" is unknown: ${letterDesignations.join(" ")}, or conductors such as Au/Pt`;
 }
 
+export const designations = [...letterDesignations, ...furtherDesignations];
+
 export const couple: Kind<Thermocouple> = {
   name: "thermocouple type",
-  options: [...letterDesignations, ...furtherDesignations],
+  options: designations,
   read(cell) {
     return thermocouple(String(cell)) ?? unknown(String(cell));
   },

@@ -1,6 +1,6 @@
 /** The pair between head and terminals: another type, or copper. */
 import { type Lead, Refusal, wrongKind } from "../../core";
-import { couple } from "./couple";
+import { couple, designations } from "./couple";
 import type { Kind } from "./kind";
 
 /** Compensating cables (IEC 60584-3: a C after the type's letter) have a tolerance and no function of their own. */
@@ -11,7 +11,7 @@ const EXTENSION = /^([BCEJKNRST])X$/;
 
 export const lead: Kind<Lead> = {
   name: "lead",
-  options: ["copper", ...(couple.options ?? [])],
+  options: ["copper", ...designations],
   read(cell, label, unit) {
     const name = String(cell).trim().toUpperCase();
     if (name === "COPPER") return "copper";

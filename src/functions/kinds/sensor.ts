@@ -1,6 +1,6 @@
 /** A thermocouple, or the platinum sensor at its reference junction. */
 import { Refusal, type Thermocouple } from "../../core";
-import { couple } from "./couple";
+import { couple, designations } from "./couple";
 import type { Kind } from "./kind";
 
 export type Sensor = Thermocouple | "Pt";
@@ -9,7 +9,7 @@ const PLATINUM = /^\s*(type\s*)?pt\s*$/i;
 
 export const sensor: Kind<Sensor> = {
   name: couple.name,
-  options: [...(couple.options ?? []), "Pt"],
+  options: [...designations, "Pt"],
   read(cell, label, unit) {
     if (PLATINUM.test(String(cell))) return "Pt";
     const found = couple.read(cell, label, unit);

@@ -8,7 +8,7 @@ export const truth: Kind<boolean> = {
   read(cell, label) {
     if (typeof cell === "boolean") return cell;
     const word = String(cell).trim().toUpperCase();
-    if (typeof cell === "string" && (word === "TRUE" || word === "FALSE")) return word === "TRUE";
+    if (word === "TRUE" || word === "FALSE") return word === "TRUE";
     const given = typeof cell === "number" ? readNumber(cell, label) : `"${shown(word)}"`;
     return given instanceof Refusal ? given : wrongKind`${label}: ${given} is neither TRUE nor FALSE`;
   },
