@@ -150,7 +150,7 @@ describe("STATEMENT", () => {
     expect(text(STATEMENT(one(1.8), one(3.6), one(0.9), one("guarded 0.83"), none, one("F")))).toBe(
       "Pass: the error of 1.8 °F lies within the acceptance limit of ±2.853 °F, the limit of ±3.6 °F less the guard band. " +
         "Decision rule: acceptance with a guard band (ILAC-G8:09/2019, 4.2.2), guard band 0.747 °F = 0.83 × U, k = 2. " +
-        "Largest specific risk of a wrong Pass: at most 4.9 %.",
+        "Largest specific risk of a wrong Pass by this rule: at most 4.9 %.",
     );
     expect(text(STATEMENT(one(1), one(2), one("")))).toBe("#VALUE! expanded uncertainty: the cell is blank");
   });

@@ -70,7 +70,7 @@ export function statement(
         `Decision rule: ${clauses[rule.kind]}, ${band}.`,
         risk === undefined
           ? "No error could pass."
-          : `Largest specific risk of a wrong Pass: ${percentAtMost(risk)}.`,
+          : `Largest specific risk of a wrong Pass by this rule: ${percentAtMost(risk)}.`,
       ].join(" ");
     },
   };

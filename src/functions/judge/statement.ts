@@ -24,7 +24,7 @@ import { guardedUnlessSaid } from "./options";
  * @keywords certificate, statement of conformity, decision rule, risk, guard band
  * @related VERDICT, ACCEPTANCE, CONFORMITY, REPORTVALUE
  * @caution Agree on the decision rule with the customer before the work. A stated Pass does not release a sensor for an alarm, a trip or another safety duty.
- * @example =BEAD.STATEMENT(1.2,2.5,0.5) → "Pass: the error of 1.2 °C lies within the acceptance limit of ±2 °C, the limit of ±2.5 °C less the guard band. Decision rule: acceptance with a guard band (ILAC-G8:09/2019, 4.2.2), guard band 0.5 °C = U, k = 2. Largest specific risk of a wrong Pass: at most 2.3 %."
+ * @example =BEAD.STATEMENT(1.2,2.5,0.5) → "Pass: the error of 1.2 °C lies within the acceptance limit of ±2 °C, the limit of ±2.5 °C less the guard band. Decision rule: acceptance with a guard band (ILAC-G8:09/2019, 4.2.2), guard band 0.5 °C = U, k = 2. Largest specific risk of a wrong Pass by this rule: at most 2.3 %."
  */
 export function STATEMENT(
   error: unknown[][],

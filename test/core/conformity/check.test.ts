@@ -189,7 +189,7 @@ describe("statement", () => {
     expect(sentence(1.2, 2.2, 0.5)).toBe(
       "Pass: the error of 1.2 °C lies within the acceptance limit of ±1.7 °C, the limit of ±2.2 °C less the guard band. " +
         "Decision rule: acceptance with a guard band (ILAC-G8:09/2019, 4.2.2), guard band 0.5 °C = U, k = 2. " +
-        "Largest specific risk of a wrong Pass: at most 2.3 %.",
+        "Largest specific risk of a wrong Pass by this rule: at most 2.3 %.",
     );
   });
 
@@ -197,7 +197,7 @@ describe("statement", () => {
     expect(sentence(2, 2.2, 0.5, rule("simple"))).toBe(
       "Pass: the error of 2 °C lies within the limit of ±2.2 °C. " +
         "Decision rule: simple acceptance (ILAC-G8:09/2019, 4.2.1), no guard band, U = 0.5 °C, k = 2. " +
-        "Largest specific risk of a wrong Pass: at most 50 %.",
+        "Largest specific risk of a wrong Pass by this rule: at most 50 %.",
     );
   });
 
