@@ -1,5 +1,6 @@
 /** Spikes taken out of a record by a moving median. */
 import { type Refusal, wrongKind } from "../errors";
+import { refusedSetting } from "../numeric/above-zero";
 import { MedianWindow } from "../numeric/median";
 import { exceeds, roundedLimit } from "../numeric/rounded-limit";
 
@@ -26,8 +27,8 @@ export function despiker(halfWindow = 3, threshold = 3): Despiker | Refusal {
   if (!(Number.isInteger(halfWindow) && halfWindow >= 1 && halfWindow <= LONGEST_HALF_WINDOW)) {
     return wrongKind`half window ${halfWindow} is no whole number from 1 to ${LONGEST_HALF_WINDOW}`;
   }
-  if (threshold === 0) return wrongKind`threshold: 0 or an empty cell`;
-  if (!(threshold > 0)) return wrongKind`threshold ${threshold} is not above 0`;
+  const refused = refusedSetting(threshold, "threshold");
+  if (refused !== undefined) return refused;
   const window = new MedianWindow(2 * halfWindow + 1);
   return (readings) => {
     const result = Float64Array.from(readings);

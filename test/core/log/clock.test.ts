@@ -58,6 +58,9 @@ describe("a stamp out of order", () => {
       repairs: ["", "", "", out, "", "", ""],
     });
     expect(repair(0, 2, 4, 1, 10.1, 12.1, 14.1)).toBe("clock set back, 5 min added");
+    // A millionth of a minute is the rounding of the times.
+    expect(repair(-4, -2, 0, -3, 6 + 1e-6, 8, 10)).toBe(out);
+    expect(repair(-4, -2, 0, -3, 6 + 3e-6, 8, 10)).toBe("clock set back, 5 min added");
   });
 
   it("may stand between two equal ones, which are then spread with it", () => {

@@ -34,6 +34,13 @@ describe("the ramp rate", () => {
     expect(rates[6]).toBeCloseTo((-2 * 1 + 2 * 9) / 10, 7);
   });
 
+  it("has a window whose edges hold a scan that is off by the rounding of its time, and no more", () => {
+    // Half a window is 2 minutes: 0, 1 and 9 °C at 0, 1 and 2 minutes rise by 4.5 °C/min, the first two by 1.
+    const atStart = (last: number) => given(rampRate(grid(column(0, 1, last)), column(0, 1, 9), 4))[0];
+    expect(atStart(2 + 4e-7)).toBeCloseTo(4.5, 5);
+    expect(atStart(2 + 1e-6)).toBeCloseTo(1, 12);
+  });
+
   it("has no value at a missing reading, nor where no second time is near", () => {
     const rates = given(rampRate(grid(column(0, 1, 2, 3, 60, 120)), column(1, undefined, 3, 4, 4, 5)));
     expect(rates[0]).toBeCloseTo(1, 12);
