@@ -2,7 +2,8 @@
 import { describe, expect, it } from "vitest";
 import { noAnswer, wrongKind } from "../../src/core";
 import * as worksheet from "../../src/functions";
-import { ifGiven, once, readings, unit } from "../../src/functions/arguments";
+import { each, ifGiven, once, readings, unit } from "../../src/functions/arguments";
+import { cellwise } from "../../src/functions/cellwise";
 import { columnwise } from "../../src/functions/columnwise";
 import { declarationOf } from "../../src/functions/declaration";
 import { choice } from "../../src/functions/kinds/kind";
@@ -122,6 +123,17 @@ describe("the declaration of a worksheet function", () => {
       ["once", true],
     ]);
     expect(result).toMatchObject({ name: "EMF", unit: "mV" });
+  });
+
+  it("is made where the function is, by whatever kind of function it is", () => {
+    const one = () => [];
+    const other = () => [];
+    const cellular = { arguments: { value: each(number) }, result: wordResult, cell: () => 1 };
+    const spec = { arguments: { value: once(number) }, result: wordResult, cells: () => [[1]] };
+    cellwise(one, cellular);
+    whole(other, spec);
+    expect(declarationOf(one)).toBe(cellular);
+    expect(declarationOf(other)).toBe(spec);
   });
 
   it("says in which shape an argument comes, and that it must be given", () => {

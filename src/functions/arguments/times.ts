@@ -21,7 +21,7 @@ export const times: Argument<Times, "column", false> = {
     const inSheet = new Float64Array(given.length);
     let count = 0;
     for (let row = 0; row < given.length; row++) {
-      const [cell] = given[row] as readonly unknown[];
+      const cell = (given[row] as readonly unknown[])[0];
       if (Number.isFinite(cell)) {
         inSheet[row] = cell as number;
         count = row + 1;

@@ -6,7 +6,6 @@ export const truth: Kind<boolean> = {
   name: "TRUE or FALSE",
   options: ["TRUE", "FALSE"],
   read(cell, label) {
-    if (typeof cell === "boolean") return cell;
     const word = String(cell).trim().toUpperCase();
     if (word === "TRUE" || word === "FALSE") return word === "TRUE";
     const given = typeof cell === "number" ? readNumber(cell, label) : `"${shown(word)}"`;
