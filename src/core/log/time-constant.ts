@@ -102,7 +102,8 @@ class Step {
       this.means[i + 1] = (this.means[i] as number) + off / (i + 1);
       this.squaresBefore[i + 1] =
         (this.squaresBefore[i] as number) + off * ((values[i] as number) - (this.means[i + 1] as number));
-      const interval = i > 0 ? (times[i] as number) - (times[i - 1] as number) : 0;
+      // NaN in the first row, which is no interval.
+      const interval = (times[i] as number) - (times[i - 1] as number);
       if (interval > 0 && interval < shortest) shortest = interval;
     }
     this.shortest = shortest * SHORTEST_PART_OF_INTERVAL;

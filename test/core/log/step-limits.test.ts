@@ -44,7 +44,8 @@ describe("a recorded step", () => {
       const y = response(30, 60, noise);
       const answer = timeConstant(grid(seconds(30)), y);
       if ("uncertainty" in answer) return { fixed: true, share: answer.uncertainty / answer.timeConstant };
-      const [tau, u] = (does.exec(refusal(answer)) ?? []).slice(1).map(Number);
+      expect(refusal(answer)).toMatch(does);
+      const [tau, u] = does.exec(refusal(answer))!.slice(1).map(Number);
       return { fixed: false, share: u! / tau! };
     });
     for (const { fixed, share } of shares) expect(share <= 0.5).toBe(fixed);
