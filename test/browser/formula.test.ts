@@ -18,15 +18,10 @@ beforeAll(async () => {
   sheet = await openSheet();
 });
 beforeEach(async () => {
-  bench = await sheet.page.evaluate(() =>
-    window.beadlineSheet!.addSheet({
-      name: "Bench",
-      columns: [],
-      frozenRows: 0,
-      printOnePageWide: true,
-      cells: [],
-    }),
-  );
+  bench = await sheet.page.evaluate(async () => {
+    const blank = { name: "Bench", columns: [], frozenRows: 0, printOnePageWide: true as const, cells: [] };
+    return await window.beadlineSheet!.addSheet(blank);
+  });
 });
 afterAll(() => closePage(sheet));
 
