@@ -50,6 +50,8 @@ describe("a spike", () => {
   it("is known among three readings, and not between two", () => {
     expect(despike(column(5, 90, 6, 5), 1, 1)).toEqual(column(5, 6, 6, 5));
     expect(despike(column(5, 90, undefined, 6, 5), 1, 1).slice(0, 2)).toEqual(column(5, 90));
+    // Both lie half a step from their median, which a threshold below one half would count as far.
+    expect(despike(column(1, 2), 1, 0.4)).toEqual(column(1, 2));
   });
 
   it("is looked for among the scans within the half window and no others", () => {
