@@ -1,6 +1,6 @@
 type Attributes = Record<string, string | boolean | undefined>;
 
-/** An element with text, never markup: what a catalogue or a sheet holds is shown as it is. */
+/** An element with text, never markup: what a catalogue, a sheet or a file holds is shown as it is. */
 export function make<Tag extends keyof HTMLElementTagNameMap>(
   tag: Tag,
   attributes: Attributes = {},

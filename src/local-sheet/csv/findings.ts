@@ -1,4 +1,4 @@
-import { make } from "./make";
+import { make } from "../../taskpane/dom";
 import { type Log, maxColumns, maxRows } from "./read-log";
 import { rowsThatFit } from "./to-sheet";
 import { count, counted } from "./words";

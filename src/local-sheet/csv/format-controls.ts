@@ -1,4 +1,4 @@
-import { make } from "./make";
+import { make } from "../../taskpane/dom";
 import type { LogFormat } from "./sniff";
 
 const delimiterNames = [

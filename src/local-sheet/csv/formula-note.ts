@@ -1,7 +1,7 @@
 import type { Catalogue } from "../../catalogue/catalogue";
+import { make } from "../../taskpane/dom";
 import { addressOn, parseCell } from "../address";
 import type { Workbook } from "../workbook";
-import { make } from "./make";
 import type { Log } from "./read-log";
 import { type Suggestion, suggest } from "./suggest";
 import { rowsThatFit } from "./to-sheet";

@@ -1,10 +1,10 @@
 import type { Catalogue } from "../../catalogue/catalogue";
+import { make } from "../../taskpane/dom";
 import type { Workbook } from "../workbook";
 import type { DecodedText } from "./decode";
 import { findings, refusalOf } from "./findings";
 import { formatControls } from "./format-controls";
 import { formulaNote } from "./formula-note";
-import { make } from "./make";
 import { previewTable } from "./preview-table";
 import { type Log, readLog } from "./read-log";
 import { type LogFormat, sniff } from "./sniff";

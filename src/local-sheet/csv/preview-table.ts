@@ -1,4 +1,4 @@
-import { make } from "./make";
+import { make } from "../../taskpane/dom";
 import type { ColumnKind, Log, LogCell } from "./read-log";
 
 const kindNames: Record<ColumnKind, string> = {

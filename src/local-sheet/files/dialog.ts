@@ -1,4 +1,4 @@
-import { make } from "../csv/make";
+import { make } from "../../taskpane/dom";
 
 export interface Choice {
   words: string;
