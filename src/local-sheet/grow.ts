@@ -24,12 +24,15 @@ interface Selections {
   selections: { range: { endRow: number; endColumn: number } }[];
 }
 
-/** A cell beyond the end, typed into the name box, is gone to all the same. */
+/** A cell beyond the end, typed into the name box, is gone to all the same; one that Excel has not is not. */
 export function growWithSelection(api: FUniver): void {
-  api.addEvent(api.Event.BeforeCommandExecute, ({ id, params }) => {
-    if (id !== SetSelectionsOperation.id) return;
-    const { unitId, subUnitId, selections } = params as Selections;
+  api.addEvent(api.Event.BeforeCommandExecute, (event) => {
+    if (event.id !== SetSelectionsOperation.id) return;
+    const { unitId, subUnitId, selections } = event.params as Selections;
     const sheet = api.getWorkbook(unitId)?.getSheetBySheetId(subUnitId);
-    for (const { range } of sheet ? selections : []) growTo(sheet!, range.endRow, range.endColumn);
+    for (const { range } of sheet ? selections : []) {
+      if (range.endRow > LAST_ROW || range.endColumn > LAST_COLUMN) event.cancel = true;
+      else growTo(sheet!, range.endRow, range.endColumn);
+    }
   });
 }

@@ -50,6 +50,12 @@ describe("typing into the local sheet", () => {
     expect(found).toBeCloseTo(100, 1);
     expect(await readValues(page, on("A30000:B30000"))).toEqual([["", ""]]);
     await expect(readValues(page, on("A1048577"))).rejects.toThrow("1048576 rows");
+    // A row that Excel has not: the selection stays, and closing the page fails on a script error.
+    await goToCell(page, "B2");
+    const nameBox = page.locator("#grid input").first();
+    await nameBox.fill("A2000000");
+    await nameBox.press("Enter");
+    expect(await page.evaluate(() => window.beadlineSheet!.getSelection())).toMatch(/!B2$/);
     await goToCell(page, "A1");
   });
 
